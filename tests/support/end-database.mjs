@@ -1,0 +1,4 @@
+// Ends the database server that this run started, if it did.
+export default async function endDatabase() {
+  await globalThis.stopTestDatabase?.();
+}
