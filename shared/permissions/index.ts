@@ -1,0 +1,2 @@
+export * from './can';
+export * from './roles';
