@@ -18,8 +18,8 @@ function commonWidth(records: readonly FastaRecord[]): number {
 
 /** Reports rows whose width differs: `rows-not-aligned` once for a plain list of sequences, `row-length` for each. */
 export function checkWidths(records: readonly FastaRecord[], issues: IssueList): number {
-  const width = commonWidth(records);
-  const odd = records.filter((record) => record.text.length !== width);
+  const width = commonWidth(records.filter((record) => record.text !== ''));
+  const odd = records.filter((record) => record.text !== '' && record.text.length !== width);
   const first = odd[0];
   if (first === undefined) return width;
   if (records.every((record) => !/[-.~]/.test(record.text)))
@@ -28,7 +28,7 @@ export function checkWidths(records: readonly FastaRecord[], issues: IssueList):
       'The rows have different lengths and no gaps: these sequences are not aligned yet. Align them first, then upload the aligned file.',
       { line: first.line, column: 1 },
     );
-  const agreeing = records.length - odd.length;
+  const agreeing = records.filter((record) => record.text.length === width).length;
   const cut = odd.length === 1 && first === records.at(-1) && first.text.length < width;
   for (const record of odd) {
     const found = `Row ${shown(record.name)} has ${record.text.length} columns`;

@@ -37,7 +37,8 @@ export function recognizeTextFile(text: string): TextFileKind {
   const beyondComments = lines.find((line) => !line.startsWith('#')) ?? '';
   if (/^(data_|loop_|_[a-z])/i.test(beyondComments)) return 'mmcif';
   if (PDB_RECORD.test(first)) return 'pdb';
-  const blockLines = lines.slice(1).filter((line) => BLOCK_LINE.test(line)).length;
-  if (/multiple sequence alignment/i.test(first) || blockLines * 2 > lines.length) return 'blocks';
+  const body = lines.slice(1).filter((line) => !/^\s[\s*:.]*$/.test(line));
+  const blockLines = body.filter((line) => BLOCK_LINE.test(line)).length;
+  if (/multiple sequence alignment/i.test(first) || blockLines * 2 > body.length) return 'blocks';
   return 'unknown';
 }
