@@ -1,0 +1,106 @@
+import type { DataSource, EntityManager } from 'typeorm';
+import { busy, conflict } from '../lib/problem';
+import { ClientRequest } from './entities';
+import { requestContext } from './request-context';
+import { isConnectionLost, isDuplicate, isRetryable } from './transient-errors';
+import { Unit, type AnnouncedEvent } from './unit';
+
+const attempts = 6;
+/** Everything of one request fits in well under this; a unit that waits longer gives its connection back. */
+const wait = (attempt: number) =>
+  new Promise((done) => setTimeout(done, 5 + Math.random() * 20 * 2 ** attempt));
+
+export interface WriteScope {
+  /** The project whose events this unit may announce; null for what belongs to no project. */
+  projectId: string | null;
+  /** Who acts, when it is not the person who asks (a job acts for the person who started it). */
+  actorId?: string;
+}
+
+export type Publish = (events: readonly AnnouncedEvent[]) => void;
+
+/**
+ * The only place where a transaction begins. One unit writes rows, audit, events, jobs and the reply kept for the
+ * client's key, commits, and only then publishes. Deadlocks, lock waits and snapshot errors run the whole unit again.
+ */
+export class UnitOfWork {
+  private publish: Publish = () => {};
+
+  constructor(private readonly source: DataSource) {}
+
+  onCommitted(publish: Publish): void {
+    this.publish = publish;
+  }
+
+  /** Reads outside a unit. */
+  get reader(): EntityManager {
+    return this.source.manager;
+  }
+
+  /** `work` returns what is answered; asked again under the same client key, the same is answered without working. */
+  async write<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>): Promise<T> {
+    for (let attempt = 0; ; attempt += 1) {
+      try {
+        const { reply, events } = await this.once(scope, work);
+        if (events.length > 0) this.publish(events);
+        return reply;
+      } catch (error) {
+        // A clash on the client's key means that the same request was just answered elsewhere: the retry finds it.
+        const clashed = isDuplicate(error) && requestContext()?.clientRequest != null && attempt === 0;
+        // A lost connection may have been lost while committing: only a client's key makes trying again safe.
+        const again =
+          isRetryable(error) ||
+          clashed ||
+          (isConnectionLost(error) && requestContext()?.clientRequest != null);
+        if (again && attempt + 1 < attempts) {
+          await wait(attempt);
+          continue;
+        }
+        if (isConnectionLost(error))
+          throw busy('The database does not answer. Your work is kept; try again in a moment.');
+        if (isRetryable(error)) throw busy('Too many people write here at once. Try again in a moment.');
+        throw error;
+      }
+    }
+  }
+
+  private async once<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>) {
+    const context = requestContext();
+    const actorId = scope.actorId ?? context?.actorId;
+    if (!actorId) throw new Error('A unit of work needs somebody who acts.');
+    return this.source.transaction('READ COMMITTED', async (manager) => {
+      const unit = new Unit(manager, {
+        actorId,
+        requestId: context?.requestId ?? 'job',
+        projectId: scope.projectId,
+      });
+      await unit.lockStream();
+      const clientRequest = context?.clientRequest;
+      if (clientRequest) {
+        const known = await manager.findOneBy(ClientRequest, {
+          personId: actorId,
+          clientKey: clientRequest.key,
+        });
+        if (known && known.requestHash !== clientRequest.hash) {
+          throw conflict(
+            'key-reused',
+            'This request key was used before for something else. Send it under a new key.',
+          );
+        }
+        if (known) return { reply: known.reply as T, events: [] };
+      }
+      const reply = await work(unit);
+      await unit.seal();
+      if (clientRequest) {
+        await manager.insert(ClientRequest, {
+          personId: actorId,
+          clientKey: clientRequest.key,
+          requestHash: clientRequest.hash,
+          reply: reply as object,
+          at: unit.at,
+        });
+      }
+      return { reply, events: unit.events };
+    });
+  }
+}
