@@ -76,6 +76,14 @@ export const rooms = [
     advice: 'Components take plain data and give events out: load and navigate in a feature.',
   },
   {
+    // The one component that knows the router: an anchor that navigates without loading the page again.
+    room: 'components/ui/link.tsx',
+    mayImport: ['components', 'shared/*'],
+    packages: { not: [...serverPackages, '@tanstack/react-query', 'socket.io-client'] },
+    node: false,
+    advice: 'A link only follows the address it is given.',
+  },
+  {
     room: 'features/*',
     mayImport: ['components', 'client', 'shared/*', 'features/*#index'],
     packages: { not: serverPackages },

@@ -101,6 +101,11 @@ const table: Record<string, Row> = {
     ],
     allowed: ["import { View } from 'react-native';", "import { x } from '@/components/theme/tokens';"],
   },
+  'components/ui/link.tsx': {
+    file: 'components/ui/link.tsx',
+    forbidden: [["import { x } from '@/client/api';", /A link only follows the address/]],
+    allowed: ["import { Link } from 'expo-router';", "import { x } from '@/components/theme';"],
+  },
   'features/*': {
     file: 'features/plans/planted.tsx',
     forbidden: [
