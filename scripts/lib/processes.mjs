@@ -86,11 +86,32 @@ export function listProcesses() {
   }
 }
 
+const running = new Set();
+
 /** Runs a program with its output shown, and gives its exit code. */
 export function run(command, args, options = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { stdio: 'inherit', ...options });
+    running.add(child);
     child.once('error', reject);
-    child.once('exit', (code, signal) => resolve(code ?? (signal ? 1 : 0)));
+    child.once('exit', (code) => {
+      running.delete(child);
+      resolve(code ?? 1);
+    });
   });
 }
+
+/** On the first signal to end: ends what `run` runs now, does `cleanUp`, and exits. Gives a way to take it back. */
+export function onEndSignal(cleanUp) {
+  const end = async () => {
+    takeBack();
+    running.forEach((child) => child.kill('SIGTERM'));
+    await cleanUp();
+    process.exit(130);
+  };
+  const takeBack = () => endSignals.forEach((name) => process.off(name, end));
+  endSignals.forEach((name) => process.on(name, end));
+  return takeBack;
+}
+
+export const endSignals = ['SIGINT', 'SIGTERM', 'SIGHUP'];
