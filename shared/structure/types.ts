@@ -21,6 +21,9 @@ export interface ChainResidue {
 export interface Ligand {
   name: string;
   label: string;
+  /** Range in the model's atom arrays. */
+  atomStart: number;
+  atomCount: number;
 }
 
 export interface SequenceDifference {
@@ -57,7 +60,10 @@ export interface Chain {
   references: DatabaseReference[];
 }
 
-/** Atoms of one model as parallel arrays; lengths in ångström. */
+/**
+ * Atoms of one model as parallel arrays; lengths in ångström. They stand chain by chain in the order of `chains`;
+ * within a chain, residues and ligands in file order, then waters.
+ */
 export interface AtomArrays {
   count: number;
   xAngstrom: Float32Array;
