@@ -30,7 +30,7 @@ export interface PairAlignment {
 export const DEFAULT_GAP_RULES: GapRules = { openPenalty: 10, extendPenalty: 0.5, ends: 'free' };
 
 /** Two bytes a cell are kept; more cells than this should not be asked for. */
-export const MAX_PAIR_CELLS = 100_000_000;
+export const MAX_PAIR_CELLS = 50_000_000;
 
 /** Whether aligning two sequences of these lengths stays within the memory a worker has. */
 export function fitsInMemory(lengthA: number, lengthB: number, maxCells = MAX_PAIR_CELLS): boolean {
