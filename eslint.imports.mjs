@@ -91,7 +91,7 @@ export const importsRule = {
       ExportNamedDeclaration: (node) => check(node.source),
       ExportAllDeclaration: (node) => check(node.source),
       ImportExpression: (node) => check(node.source),
-      TSImportType: (node) => check(node.argument?.literal ?? node.source),
+      TSImportType: (node) => check(node.source),
       TSExternalModuleReference: (node) => check(node.expression),
       CallExpression: (node) => {
         if (node.callee.type === 'Identifier' && node.callee.name === 'require') check(node.arguments[0]);

@@ -26,9 +26,16 @@ const asRoot = () => (process.getuid?.() === 0 ? ['--user=root'] : []);
  * - `durable`: flush at each commit. Only tests that do not measure durability may switch it off.
  * - `allRights`: the account may do everything (tests make databases); else only `locant…` databases.
  * - `extra`: further mariadbd options.
+ * - `patienceMs`: how long one that runs already may take to answer, and then to end.
  * Gives { url, port, pid, adopted, stop }. `stop` does nothing while the process that started it still lives.
  */
-export async function startDatabase({ dir, durable = true, allRights = false, extra = [] }) {
+export async function startDatabase({
+  dir,
+  durable = true,
+  allRights = false,
+  extra = [],
+  patienceMs = 10_000,
+}) {
   mkdirSync(dir, { recursive: true, mode: 0o700 });
   chmodSync(dir, 0o700);
   return withFileLock(path.join(dir, 'lock'), async () => {
@@ -36,13 +43,13 @@ export async function startDatabase({ dir, durable = true, allRights = false, ex
     const state = readState(place);
     const found = findServer(place);
     if (found !== null) {
-      if (state.port !== null && (await waitForGreeting(state.port, found, 10_000))) {
+      if (state.port !== null && (await waitForGreeting(state.port, found, patienceMs))) {
         const starter = state.starter;
         const mayStop = starter === null || starter === process.pid || !isAlive(starter);
         if (mayStop) writeState(place, { ...state, starter: process.pid });
         return handle(place, state, found, true, mayStop);
       }
-      await endProcess(found);
+      await endProcess(found, patienceMs);
     }
     if (!existsSync(path.join(place.data, 'mysql'))) install(place);
     if (state.port === null || !(await isPortFree(state.port))) state.port = await anyFreePort();
@@ -61,6 +68,16 @@ export async function runningDatabase(dir) {
   const pid = findServer(place);
   if (pid === null || state.port === null || !(await waitForGreeting(state.port, pid, 2_000))) return null;
   return { url: addressOf(state), port: state.port, pid };
+}
+
+/** Ends the server in `dir` and removes the folder, unless the process that started it still lives. */
+export async function removeLeftOver(dir) {
+  const place = describePlace(dir);
+  const { starter } = readState(place);
+  if (starter !== null && isAlive(starter)) return;
+  const pid = findServer(place);
+  if (pid !== null) await endProcess(pid);
+  rmSync(dir, { recursive: true, force: true });
 }
 
 function describePlace(dir) {
@@ -113,10 +130,17 @@ function install(place) {
   const program = findProgram('mariadb-install-db', 'mysql_install_db');
   if (program === null) throw new Error('mariadb-install-db is missing: install the MariaDB server.');
   const fresh = `${place.data}.new`;
+  if (existsSync(place.data))
+    throw new Error(`${place.data} is no whole database folder; move it away first.`);
   rmSync(fresh, { recursive: true, force: true });
-  rmSync(place.data, { recursive: true, force: true });
-  const options = ['--no-defaults', `--datadir=${fresh}`, '--auth-root-authentication-method=normal'];
+  // Named from its own folder: the program trips over spaces in a path.
+  const options = [
+    '--no-defaults',
+    `--datadir=./${path.basename(fresh)}`,
+    '--auth-root-authentication-method=normal',
+  ];
   const made = spawnSync(program, [...options, '--skip-test-db', '--skip-name-resolve', ...asRoot()], {
+    cwd: place.dir,
     encoding: 'utf8',
   });
   if (made.status !== 0)

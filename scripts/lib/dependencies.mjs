@@ -5,7 +5,7 @@ import { findProgram, run } from './processes.mjs';
 
 /** Runs `npm ci` when node_modules is missing, half-made or of another lock. Gives true when it ran. */
 export async function installPackages() {
-  if (isInstalled()) return false;
+  if (isLockInstalled()) return false;
   console.log('Installing npm packages (a minute or two) …');
   const args = ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error'];
   const npm = process.env.npm_execpath;
@@ -17,17 +17,23 @@ export async function installPackages() {
   return true;
 }
 
+/** True when each package of the lock is there in its version (those of other systems may be absent). */
+export function isInstalled(wanted, present) {
+  return Object.entries(wanted).every(
+    ([place, { version, optional, link }]) =>
+      place === '' ||
+      link ||
+      present[place]?.version === version ||
+      (optional && present[place] === undefined),
+  );
+}
+
 // npm writes its own list of what it installed as the last step, so a broken-off install is seen too.
-function isInstalled() {
+function isLockInstalled() {
   try {
-    const wanted = readPackages(fromRoot('package-lock.json'));
-    const present = readPackages(fromRoot('node_modules', '.package-lock.json'));
-    return Object.entries(wanted).every(
-      ([place, { version, optional, link }]) =>
-        place === '' ||
-        link ||
-        present[place]?.version === version ||
-        (optional && present[place] === undefined),
+    return isInstalled(
+      readPackages(fromRoot('package-lock.json')),
+      readPackages(fromRoot('node_modules', '.package-lock.json')),
     );
   } catch {
     return false;

@@ -88,24 +88,38 @@ export function listProcesses() {
 
 const running = new Set();
 
-/** Runs a program with its output shown, and gives its exit code. */
+/**
+ * Runs a program with its output shown, and gives its exit code. It has a process group of its own, which ends
+ * with it: whatever it has started and left behind goes too.
+ */
 export function run(command, args, options = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { stdio: 'inherit', ...options });
+    const child = spawn(command, args, { stdio: 'inherit', detached: true, ...options });
     running.add(child);
     child.once('error', reject);
     child.once('exit', (code) => {
       running.delete(child);
+      signalGroup(child, 'SIGKILL');
       resolve(code ?? 1);
     });
   });
 }
 
+function signalGroup(child, signal) {
+  try {
+    process.kill(-child.pid, signal);
+  } catch {
+    // nobody is left in it
+  }
+}
+
+export const endSignals = ['SIGINT', 'SIGTERM', 'SIGHUP'];
+
 /** On the first signal to end: ends what `run` runs now, does `cleanUp`, and exits. Gives a way to take it back. */
 export function onEndSignal(cleanUp) {
   const end = async () => {
     takeBack();
-    running.forEach((child) => child.kill('SIGTERM'));
+    running.forEach((child) => signalGroup(child, 'SIGTERM'));
     await cleanUp();
     process.exit(130);
   };
@@ -113,5 +127,3 @@ export function onEndSignal(cleanUp) {
   endSignals.forEach((name) => process.on(name, end));
   return takeBack;
 }
-
-export const endSignals = ['SIGINT', 'SIGTERM', 'SIGHUP'];

@@ -25,7 +25,8 @@ const madeByBuild = [fromRoot('public', 'fonts')];
 /** The hash of everything that goes into the web client. */
 export const clientSourceHash = () => hashFiles(clientSources.map((name) => fromRoot(name)));
 
-function hashFiles(places) {
+/** One hash over the files under these places: their names and contents. */
+export function hashFiles(places) {
   const hash = createHash('sha256');
   for (const file of places.flatMap(listFiles)) {
     const content = createHash('sha256').update(readFileSync(file)).digest('hex');
