@@ -22,23 +22,37 @@ export const IUPAC_BASES: Readonly<Record<string, string>> = {
 
 const letters = 'ACGTRYSWKMBDHVNacgtryswkmbdhvn';
 const partners = 'TGCAYRSWMKVHDBNtgcayrswmkvhdbn';
-const complementOf = new Map([...letters].map((letter, index) => [letter, partners.charAt(index)]));
+/** By character code; letters that are no bases stay. */
+const PARTNER_CODES = Uint16Array.from({ length: 128 }, (_, code) => code);
+for (const [index, letter] of [...letters].entries())
+  PARTNER_CODES[letter.charCodeAt(0)] = partners.charCodeAt(index);
+/** As many codes as a call may take as arguments. */
+const CHUNK = 8192;
+
+function lettersOf(codes: Uint16Array): string {
+  let text = '';
+  for (let start = 0; start < codes.length; start += CHUNK)
+    text += String.fromCharCode(...codes.subarray(start, start + CHUNK));
+  return text;
+}
+
+function partnerCodes(bases: string): Uint16Array {
+  const codes = new Uint16Array(bases.length);
+  for (let index = 0; index < bases.length; index += 1) {
+    const code = bases.charCodeAt(index);
+    codes[index] = PARTNER_CODES[code] ?? code;
+  }
+  return codes;
+}
 
 /** Complement of each letter in place, case kept; a letter that is no base stays. */
 export function complement(bases: string): string {
-  let result = '';
-  for (const base of bases) result += complementOf.get(base) ?? base;
-  return result;
+  return lettersOf(partnerCodes(bases));
 }
 
 /** The other strand read 5′→3′, case kept. Its own inverse for all 15 letters. */
 export function reverseComplement(bases: string): string {
-  let result = '';
-  for (let index = bases.length - 1; index >= 0; index -= 1) {
-    const base = bases.charAt(index);
-    result += complementOf.get(base) ?? base;
-  }
-  return result;
+  return lettersOf(partnerCodes(bases).reverse());
 }
 
 /** Only A, C, G and T, upper case, and at least one. */

@@ -1,4 +1,7 @@
+import type { Strand } from '../construct/bases';
 import type { BaseIndex, ResidueIndex } from '../positions';
+
+export type { Strand };
 
 /** Ways of making a change with primers. Only those in `SUPPORTED_SCHEMES` are designed; the others are answered with an issue. */
 export const SCHEME_NAMES = [
@@ -9,9 +12,6 @@ export const SCHEME_NAMES = [
 ] as const;
 export type SchemeName = (typeof SCHEME_NAMES)[number];
 export const SUPPORTED_SCHEMES: readonly SchemeName[] = ['complementary-pair'];
-
-/** The strand of the construct, as it was given, whose letters the primer carries. */
-export type Strand = '+' | '-';
 
 /** One figure held against its limit. A `limit` that is missed puts the design last; an `advice` only weighs in the ranking. */
 export interface Check {
@@ -47,6 +47,7 @@ export interface Primer {
   name: string;
   /** 5′→3′, A C G T only. */
   bases: string;
+  /** The strand of the construct, as it was given, whose letters the primer carries. */
   strand: Strand;
   /**
    * Index of the lowest base covered on the construct as given, from 0, for both strands. A primer across the origin of a
@@ -59,7 +60,7 @@ export interface Primer {
   meltingCelsius: number | null;
   /** The same against the unchanged template. */
   annealingCelsius: number | null;
-  /** How `annealingCelsius` was found: the whole primer with its mismatches, or the longer matched arm alone. */
+  /** How `annealingCelsius` was found: the whole primer with its mismatches, or the more stable arm that fits. */
   annealingBasis: 'whole-with-mismatch' | 'matched-arm';
   /** kcal/mol at 37 °C, 1 M salt; 0 when no stem forms. */
   hairpinKcalPerMol: number;
