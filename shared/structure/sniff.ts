@@ -1,5 +1,5 @@
-const LOOK_BYTES = 64 * 1024;
-const LOOK_LINES = 400;
+const LOOK_BYTES = 16 * 1024;
+const LOOK_LINES = 150;
 
 const PDB_RECORDS = new Set(
   (
@@ -19,7 +19,7 @@ export function sniffStructure(bytes: Uint8Array): 'pdb' | 'mmcif' | null {
   return kind === 'pdb' || kind === 'mmcif' ? kind : null;
 }
 
-/** The kind of a file's content. Only the beginning is looked at (64 KiB, 400 lines), but for NUL bytes all of it. */
+/** The kind of a file's content. Only the beginning is looked at (16 KiB, 150 lines), but for NUL bytes all of it. */
 export function sniffContent(bytes: Uint8Array): ContentKind {
   if (bytes[0] === 0x1f && bytes[1] === 0x8b) return 'gzip';
   if (bytes.includes(0)) return 'binary';

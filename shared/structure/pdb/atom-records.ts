@@ -3,7 +3,7 @@ import { AtomTable, type AtomRow } from '../atom-table';
 import { elementFromName } from '../element';
 import type { IssueList } from '../issue-list';
 import { isPolymerKind, residueKind } from '../residue-kind';
-import { BLANK, byteAt, columnsOf, packFour, readDecimal, readText, type LineSpan } from './columns';
+import { BLANK, type Columns, type LineSpan } from './columns';
 import { decodeHybrid36 } from './hybrid-36';
 import { ResidueRegistry } from './residue-registry';
 
@@ -32,7 +32,7 @@ export class AtomRecords {
   private lastHetero = false;
 
   constructor(
-    private readonly bytes: Uint8Array,
+    private readonly columns: Columns,
     private readonly issues: IssueList,
   ) {
     this.registry = new ResidueRegistry(issues);
@@ -41,19 +41,19 @@ export class AtomRecords {
 
   /** True when the atom was kept or was a position of one that is. */
   read(line: LineSpan, hetero: boolean): boolean {
-    const { bytes, row } = this;
+    const { columns, row } = this;
     const { start } = line;
     if (line.end - start < POSITION_END) return this.refuseShort(line);
-    row.x = readDecimal(bytes, start + 30, start + 38, NaN);
-    row.y = readDecimal(bytes, start + 38, start + 46, NaN);
-    row.z = readDecimal(bytes, start + 46, start + 54, NaN);
+    row.x = columns.decimal(start + 30, start + 38, NaN);
+    row.y = columns.decimal(start + 38, start + 46, NaN);
+    row.z = columns.decimal(start + 46, start + 54, NaN);
     if (Number.isNaN(row.x + row.y + row.z)) return this.refusePosition(line);
-    row.alternate = byteAt(bytes, start + 16);
+    row.alternate = columns.byte(start + 16);
     row.occupancy = this.readOccupancy(line);
 
-    const name = packFour(bytes, start + 17);
-    const place = packFour(bytes, start + 22);
-    const code = (byteAt(bytes, start + 21) << 8) | byteAt(bytes, start + 26);
+    const name = columns.four(start + 17);
+    const place = columns.four(start + 22);
+    const code = (columns.byte(start + 21) << 8) | columns.byte(start + 26);
     const same =
       name === this.lastName &&
       place === this.lastPlace &&
@@ -66,7 +66,7 @@ export class AtomRecords {
       this.lastHetero = hetero;
       if (!this.findResidue(line, hetero)) return false;
     }
-    row.name = this.nameId(start + 12);
+    row.name = this.nameId(line);
     row.element = this.elementId(line);
     if (!this.chooser.add(row)) return this.refuseDuplicate(line);
     const residue = this.registry.residues[this.residue];
@@ -78,16 +78,16 @@ export class AtomRecords {
 
   /** TER: of the chain it names, else of the last atom's. */
   end(line: LineSpan): void {
-    const named = columnsOf(this.bytes, line, 22, 22);
+    const named = this.columns.text(line, 22, 22);
     this.registry.endPolymer(named === '' || named === ' ' ? this.lastChain : named);
     this.residue = -1;
   }
 
   private findResidue(line: LineSpan, hetero: boolean): boolean {
     this.residue = -1;
-    const numberField = columnsOf(this.bytes, line, 23, 26);
+    const numberField = this.columns.text(line, 23, 26);
     let authorNumber = decodeHybrid36(numberField, 4);
-    let insertionCode = columnsOf(this.bytes, line, 27, 27).trim();
+    let insertionCode = this.columns.text(line, 27, 27).trim();
     if (authorNumber === null) {
       this.issues.warn(
         'bad-residue-number',
@@ -101,8 +101,8 @@ export class AtomRecords {
       authorNumber = Number(numberField + insertionCode);
       insertionCode = '';
     }
-    const name = columnsOf(this.bytes, line, 18, 21).trim();
-    this.lastChain = columnsOf(this.bytes, line, 22, 22);
+    const name = this.columns.text(line, 18, 21).trim();
+    this.lastChain = this.columns.text(line, 22, 22);
     const found = this.registry.find({
       name,
       chain: this.lastChain,
@@ -122,7 +122,7 @@ export class AtomRecords {
   /** A line may end before the occupancy, or leave it blank: then the position is whole. */
   private readOccupancy(line: LineSpan): number {
     const from = line.start + 54;
-    const occupancy = readDecimal(this.bytes, from, Math.min(line.start + 60, Math.max(line.end, from)), 1);
+    const occupancy = this.columns.decimal(from, Math.min(line.start + 60, Math.max(line.end, from)), 1);
     if (!Number.isNaN(occupancy)) return occupancy;
     this.issues.warn('bad-occupancy', 'The occupancy in columns 55 to 60 is no number; 1 is taken.', {
       line: line.number,
@@ -131,11 +131,11 @@ export class AtomRecords {
     return 1;
   }
 
-  private nameId(from: number): number {
-    const packed = packFour(this.bytes, from);
+  private nameId(line: LineSpan): number {
+    const packed = this.columns.four(line.start + 12);
     const known = this.nameIds.get(packed);
     if (known !== undefined) return known;
-    const id = this.table.addName(readText(this.bytes, from, from + 4).trim());
+    const id = this.table.addName(this.columns.text(line, 13, 16).trim());
     this.nameIds.set(packed, id);
     return id;
   }
@@ -143,8 +143,8 @@ export class AtomRecords {
   /** Columns 77–78 where they hold letters, else from the name. */
   private elementId(line: LineSpan): number {
     const at = line.start + 76;
-    const first = at < line.end ? byteAt(this.bytes, at) : BLANK;
-    const second = at + 1 < line.end ? byteAt(this.bytes, at + 1) : BLANK;
+    const first = at < line.end ? this.columns.byte(at) : BLANK;
+    const second = at + 1 < line.end ? this.columns.byte(at + 1) : BLANK;
     const stated = isLetter(second) && (first === BLANK || isLetter(first));
     // Two letters fit below 2^16; above it, the atom's name id and whether its residue is a polymer's.
     const key = stated ? (first << 8) | second : 0x10000 + this.row.name * 2 + (this.inPolymer ? 1 : 0);
@@ -152,7 +152,7 @@ export class AtomRecords {
     if (known !== undefined) return known;
     const symbol = stated
       ? String.fromCharCode(first, second).trim().toUpperCase()
-      : elementFromName(columnsOf(this.bytes, line, 13, 16), this.inPolymer);
+      : elementFromName(this.columns.text(line, 13, 16), this.inPolymer);
     const id = this.table.elementId(symbol);
     this.elementIds.set(key, id);
     return id;
@@ -168,7 +168,7 @@ export class AtomRecords {
   private refusePosition(line: LineSpan): false {
     const { x, y } = this.row;
     const column = Number.isNaN(x) ? 31 : Number.isNaN(y) ? 39 : 47;
-    const field = columnsOf(this.bytes, line, column, column + 7).trim();
+    const field = this.columns.text(line, column, column + 7).trim();
     const message = `"${field}" in columns ${column} to ${column + 7} is no coordinate; this atom is left out.`;
     this.issues.warn('bad-coordinate', message, { line: line.number, column });
     return false;
@@ -177,7 +177,7 @@ export class AtomRecords {
   private refuseDuplicate(line: LineSpan): false {
     const residue = this.registry.residues[this.residue];
     const label = residue ? `${residue.authorNumber}${residue.insertionCode}` : '';
-    const name = columnsOf(this.bytes, line, 13, 16).trim();
+    const name = this.columns.text(line, 13, 16).trim();
     this.issues.warn('duplicate-atom', `Atom ${name} of residue ${label} comes twice; the first is kept.`, {
       line: line.number,
       column: 13,

@@ -1,7 +1,7 @@
 import type { IssueList } from '../issue-list';
 import type { DatabaseReference, SequenceDifference } from '../types';
 import { readAuthorLabel } from './author-label';
-import { columnsOf, type LineSpan } from './columns';
+import { type Columns, type LineSpan } from './columns';
 
 /** DBREF, the pair DBREF1 and DBREF2 (for long accessions), and SEQADV, by author chain id. */
 export class DatabaseRecords {
@@ -11,7 +11,7 @@ export class DatabaseRecords {
   private readonly halves = new Map<string, { begin: string; end: string; database: string; line: number }>();
 
   constructor(
-    private readonly bytes: Uint8Array,
+    private readonly columns: Columns,
     private readonly issues: IssueList,
   ) {}
 
@@ -33,9 +33,9 @@ export class DatabaseRecords {
   }
 
   private readReference(line: LineSpan, isHalf: boolean): void {
-    const chain = columnsOf(this.bytes, line, 13, 13);
-    const begin = readAuthorLabel(this.bytes, line, 15, 18, 19);
-    const end = readAuthorLabel(this.bytes, line, 21, 24, 25);
+    const chain = this.columns.text(line, 13, 13);
+    const begin = readAuthorLabel(this.columns, line, 15, 18, 19);
+    const end = readAuthorLabel(this.columns, line, 21, 24, 25);
     const database = this.text(line, 27, 32);
     if (begin === null || end === null) return this.unreadable(line, chain);
     if (isHalf) {
@@ -47,7 +47,7 @@ export class DatabaseRecords {
   }
 
   private readSecondHalf(line: LineSpan): void {
-    const chain = columnsOf(this.bytes, line, 13, 13);
+    const chain = this.columns.text(line, 13, 13);
     const half = this.halves.get(chain);
     if (!half) return this.unreadable(line, chain);
     this.halves.delete(chain);
@@ -74,9 +74,9 @@ export class DatabaseRecords {
   }
 
   private readDifference(line: LineSpan): void {
-    append(this.differences, columnsOf(this.bytes, line, 17, 17), {
+    append(this.differences, this.columns.text(line, 17, 17), {
       // A residue that the chain lacks (a deletion) has no number.
-      label: readAuthorLabel(this.bytes, line, 19, 22, 23) ?? '',
+      label: readAuthorLabel(this.columns, line, 19, 22, 23) ?? '',
       residueName: this.text(line, 13, 15),
       databaseResidue: this.text(line, 40, 42),
       databaseNumber: this.text(line, 44, 48),
@@ -85,7 +85,7 @@ export class DatabaseRecords {
   }
 
   private text(line: LineSpan, first: number, last: number): string {
-    return columnsOf(this.bytes, line, first, last).trim();
+    return this.columns.text(line, first, last).trim();
   }
 
   private unreadable(line: LineSpan, chain: string): void {

@@ -1,6 +1,6 @@
 import type { Declarations } from '../draft';
 import type { IssueList } from '../issue-list';
-import { columnsOf, type LineSpan } from './columns';
+import { type Columns, type LineSpan } from './columns';
 import { readAuthorLabel } from './author-label';
 import { DatabaseRecords } from './database-records';
 import { decodeHybrid36 } from './hybrid-36';
@@ -22,18 +22,18 @@ export class HeaderRecords {
   private readonly missing: MissingRecords;
 
   constructor(
-    private readonly bytes: Uint8Array,
+    private readonly columns: Columns,
     private readonly issues: IssueList,
   ) {
-    this.database = new DatabaseRecords(bytes, issues);
-    this.missing = new MissingRecords(bytes);
+    this.database = new DatabaseRecords(columns, issues);
+    this.missing = new MissingRecords(columns);
   }
 
   read(line: LineSpan): void {
-    switch (columnsOf(this.bytes, line, 1, 6).trimEnd()) {
+    switch (this.columns.text(line, 1, 6).trimEnd()) {
       case 'TITLE':
         if (this.titleParts.length < 100)
-          this.titleParts.push(this.bytes.subarray(line.start + 10, line.end));
+          this.titleParts.push(this.columns.bytes.subarray(line.start + 10, line.end));
         break;
       case 'SEQRES':
         this.readSequence(line);
@@ -75,15 +75,15 @@ export class HeaderRecords {
   }
 
   private readSequence(line: LineSpan): void {
-    const chain = columnsOf(this.bytes, line, 12, 12) || ' ';
+    const chain = this.columns.text(line, 12, 12) || ' ';
     const names = this.sequences.get(chain) ?? [];
     if (!this.sequences.has(chain)) {
       this.sequences.set(chain, names);
-      const length = decodeHybrid36(columnsOf(this.bytes, line, 14, 17), 4);
+      const length = decodeHybrid36(this.columns.text(line, 14, 17), 4);
       if (length !== null) this.statedLengths.set(chain, { length, line: line.number });
     }
     for (let column = 20; column <= 68; column += 4) {
-      const name = columnsOf(this.bytes, line, column, column + 2).trim();
+      const name = this.columns.text(line, column, column + 2).trim();
       if (name !== '') {
         names.push(name);
         this.entries++;
@@ -93,10 +93,10 @@ export class HeaderRecords {
 
   private readModified(line: LineSpan): void {
     this.entries++;
-    const name = columnsOf(this.bytes, line, 13, 15).trim();
-    const chain = columnsOf(this.bytes, line, 17, 17);
-    const label = readAuthorLabel(this.bytes, line, 19, 22, 23);
-    const parent = columnsOf(this.bytes, line, 25, 27).trim();
+    const name = this.columns.text(line, 13, 15).trim();
+    const chain = this.columns.text(line, 17, 17);
+    const label = readAuthorLabel(this.columns, line, 19, 22, 23);
+    const parent = this.columns.text(line, 25, 27).trim();
     if (name === '' || parent === '' || label === null) {
       this.issues.warn(
         'modified-row',

@@ -1,5 +1,5 @@
 import type { MissingResidue } from '../draft';
-import { columnsOf, type LineSpan } from './columns';
+import { type Columns, type LineSpan } from './columns';
 import { decodeHybrid36 } from './hybrid-36';
 
 /** REMARK 465: declared residues without coordinates, with the models that lack them where the file tells. */
@@ -8,29 +8,28 @@ export class MissingRecords {
   private inTable = false;
   private models: MissingResidue['models'];
 
-  constructor(private readonly bytes: Uint8Array) {}
+  constructor(private readonly columns: Columns) {}
 
-  /** True when the line was a row of the table. */
+  /** Reads a line of REMARK 465; true when it was a row of the table. */
   read(line: LineSpan): boolean {
-    if (columnsOf(this.bytes, line, 8, 10) !== '465') return false;
     if (!this.inTable) {
-      this.readHeading(columnsOf(this.bytes, line, 11, 80));
+      this.readHeading(this.columns.text(line, 11, 80));
       return false;
     }
-    const name = columnsOf(this.bytes, line, 16, 18).trim();
-    const authorNumber = decodeHybrid36(columnsOf(this.bytes, line, 22, 26), 5);
+    const name = this.columns.text(line, 16, 18).trim();
+    const authorNumber = decodeHybrid36(this.columns.text(line, 22, 26), 5);
     if (name === '' || authorNumber === null) {
-      this.readHeading(columnsOf(this.bytes, line, 11, 80));
+      this.readHeading(this.columns.text(line, 11, 80));
       return false;
     }
-    const chain = columnsOf(this.bytes, line, 20, 20);
-    const model = decodeHybrid36(columnsOf(this.bytes, line, 12, 14), 3);
+    const chain = this.columns.text(line, 20, 20);
+    const model = decodeHybrid36(this.columns.text(line, 12, 14), 3);
     const rows = this.byChain.get(chain) ?? [];
     this.byChain.set(chain, rows);
     rows.push({
       name,
       authorNumber,
-      insertionCode: columnsOf(this.bytes, line, 27, 27).trim(),
+      insertionCode: this.columns.text(line, 27, 27).trim(),
       models: model === null ? this.models : { first: model, last: model },
     });
     return true;

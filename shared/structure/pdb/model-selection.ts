@@ -1,5 +1,5 @@
 import type { IssueList } from '../issue-list';
-import { columnsOf, type LineSpan } from './columns';
+import { type Columns, type LineSpan } from './columns';
 
 /**
  * Which atom lines belong to the model to be read. Models are the groups between MODEL and ENDMDL, and atoms outside
@@ -15,14 +15,14 @@ export class ModelSelection {
   private readonly numbers: number[] = [];
 
   constructor(
-    private readonly bytes: Uint8Array,
+    private readonly columns: Columns,
     private readonly wanted: number | undefined,
     private readonly issues: IssueList,
   ) {}
 
   /** MODEL. `atoms` is how many have been read so far. */
   begin(line: LineSpan, atoms: number): void {
-    const field = columnsOf(this.bytes, line, 7, 20).trim();
+    const field = this.columns.text(line, 7, 20).trim();
     const stated = /^\d{1,9}$/.test(field) ? Number(field) : null;
     if (stated === null && field !== '') {
       this.issues.warn('bad-model-number', `"${field}" is no model number.`, {

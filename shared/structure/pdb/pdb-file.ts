@@ -2,26 +2,24 @@ import type { Draft } from '../draft';
 import type { IssueList } from '../issue-list';
 import type { StructureLimits } from '../limits';
 import { AtomRecords } from './atom-records';
-import { columnsOf, packFour, type LineSpan } from './columns';
+import { Columns, packedText, type LineSpan } from './columns';
 import { HeaderRecords } from './header-records';
 import { eachLine } from './lines';
 import { ModelSelection } from './model-selection';
 
-const code = (text: string): number =>
-  packFour(
-    Uint8Array.from(text, (letter) => letter.charCodeAt(0)),
-    0,
-  );
-const ATOM = code('ATOM');
-const HETA = code('HETA');
-const TER = code('TER ');
-const MODE = code('MODE');
-const ENDM = code('ENDM');
-const END = code('END ');
-const HEADERS = new Set(['TITL', 'SEQR', 'MODR', 'DBRE', 'SEQA', 'REMA'].map(code));
+const ATOM = packedText('ATOM');
+const HETA = packedText('HETA');
+const TER = packedText('TER');
+const MODE = packedText('MODE');
+const ENDM = packedText('ENDM');
+const END = packedText('END');
+const REMA = packedText('REMA');
+const MISSING_RESIDUES = packedText(' 465');
+const HEADERS = new Set(['TITL', 'SEQR', 'MODR', 'DBRE', 'SEQA'].map(packedText));
 
 /** One pass over the lines of a file, record by record. */
 export class PdbFile {
+  private readonly columns: Columns;
   private readonly atoms: AtomRecords;
   private readonly header: HeaderRecords;
   private readonly models: ModelSelection;
@@ -30,19 +28,21 @@ export class PdbFile {
   private failed = false;
 
   constructor(
-    private readonly bytes: Uint8Array,
+    bytes: Uint8Array,
     wantedModel: number | undefined,
     private readonly limits: StructureLimits,
     private readonly issues: IssueList,
   ) {
-    this.atoms = new AtomRecords(bytes, issues);
-    this.header = new HeaderRecords(bytes, issues);
-    this.models = new ModelSelection(bytes, wantedModel, issues);
+    const columns = new Columns(bytes);
+    this.columns = columns;
+    this.atoms = new AtomRecords(columns, issues);
+    this.header = new HeaderRecords(columns, issues);
+    this.models = new ModelSelection(columns, wantedModel, issues);
   }
 
   /** Null, with an error told, when the file cannot be used. */
   read(): Draft | null {
-    eachLine(this.bytes, (line) => this.readLine(line));
+    eachLine(this.columns.bytes, (line) => this.readLine(line));
     if (this.failed) return null;
     const { table, registry } = this.atoms;
     const declarations = this.header.finish();
@@ -76,7 +76,7 @@ export class PdbFile {
       return this.models.count <= this.limits.models || this.fail('models', this.limits.models, line);
     } else if (record === ENDM) this.models.end();
     else if (record === END) this.endLine = line.number;
-    else if (HEADERS.has(record)) {
+    else if (HEADERS.has(record) || this.isMissingResidue(line, record)) {
       this.header.read(line);
       if (this.header.entries > this.limits.headerEntries) {
         return this.fail('header-rows', this.limits.headerEntries, line);
@@ -94,10 +94,16 @@ export class PdbFile {
     return this.models.count <= this.limits.models || this.fail('models', this.limits.models, line);
   }
 
+  private isMissingResidue(line: LineSpan, record: number): boolean {
+    return (
+      record === REMA && line.end - line.start >= 10 && this.columns.four(line.start + 6) === MISSING_RESIDUES
+    );
+  }
+
   /** The first four columns, blank where the line ends before them. */
   private recordCode(line: LineSpan): number {
-    if (line.end - line.start >= 4) return packFour(this.bytes, line.start);
-    return code(columnsOf(this.bytes, line, 1, 4).padEnd(4));
+    if (line.end - line.start >= 4) return this.columns.four(line.start);
+    return packedText(this.columns.text(line, 1, 4));
   }
 
   private readAfterEnd(line: LineSpan, record: number): boolean {
