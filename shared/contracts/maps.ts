@@ -6,7 +6,7 @@ export const mapStatus = z.enum(['proposed', 'confirmed', 'corrected', 'left out
 
 /** A chain residue that differs from, or is doubtful against, the protein residue it is mapped to. */
 export const mapException = z.object({
-  kind: z.enum(['mismatch', 'engineered', 'tag', 'ambiguous', 'modified', 'undetermined']),
+  kind: z.enum(['mismatch', 'engineered', 'tag', 'insertion', 'ambiguous', 'modified', 'undetermined']),
   label: z.string(),
   chainLetter: z.string(),
   residueIndex: indexFromZero.nullable(),

@@ -12,7 +12,7 @@ export const upload = z.object({
   bytes: z.int(),
   familyId: id.nullable(),
   state: uploadState,
-  /** What is being done, in words, and how far. */
+  /** While it is reading: `read` or `map`, and how far; else empty. */
   stage: z.string(),
   done: z.int(),
   total: z.int(),

@@ -21,4 +21,8 @@ export class Chain {
   @Json() missing!: string[];
   /** Chain indices with alternate positions. */
   @Json() alternates!: number[];
+  /** Modified residues: chain index and the three-letter parent. */
+  @Json() modified!: [number, string][];
+  /** What the file says of residues that differ from their database entry. */
+  @Json() differences!: { label: string; comment: string }[];
 }

@@ -1,0 +1,7 @@
+export { addAlignment, type NewAlignment, type NewAlignmentRow } from './alignment.adding';
+export { AlignmentQueries } from './alignment.queries';
+export { AlignmentRevision } from './alignment-revision.entity';
+export { AlignmentRow } from './alignment-row.entity';
+export { addAlignmentRoutes } from './alignment.routes';
+export { AlignmentSegment } from './alignment-segment.entity';
+export { Alignment } from './alignment.entity';

@@ -1,0 +1,12 @@
+export { FamilyAccess } from './family.access';
+export { FamilyQueries } from './family.queries';
+export { addFamilyRoutes } from './family.routes';
+export { FamilyService } from './family.service';
+export { Family } from './family.entity';
+export { furnishFamilies } from './furnish-families';
+export { NumberingSegment } from './numbering-segment.entity';
+export { Numbering } from './numbering.entity';
+export { addProteins, type NewProtein } from './protein.adding';
+export { ProteinDirectory, type NumberedProtein, type ProteinText } from './protein.directory';
+export { Protein } from './protein.entity';
+export { ProteinService } from './protein.service';
