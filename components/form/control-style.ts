@@ -1,7 +1,7 @@
 import type { CSSProperties } from 'react';
 import { color, face } from '@/components/theme';
 
-/** The frame of what is filled in. 16 px even where the page is denser: a smaller one makes phones zoom in. */
+/** The frame of what is filled in: 16 px wherever there is touch, since a smaller one makes phones zoom in. */
 export const controlStyle = (hasError: boolean, mono = false): CSSProperties => ({
   display: 'block',
   width: '100%',
@@ -12,5 +12,5 @@ export const controlStyle = (hasError: boolean, mono = false): CSSProperties => 
   borderRadius: 4,
   background: color.raised,
   color: color.ink,
-  font: `400 16px/24px ${mono ? face.mono : face.text}`,
+  font: `400 var(--control-size)/24px ${mono ? face.mono : face.text}`,
 });

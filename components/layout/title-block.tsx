@@ -39,7 +39,7 @@ export function TitleBlock({ items, saved }: TitleBlockProps) {
       aria-label="What this page shows"
       style={{ ...bar, minHeight: measure.titleBlock, borderTop: `1px solid ${color.lineRule}` }}
     >
-      <dl style={{ display: 'flex' }}>
+      <dl style={{ display: 'flex', flex: 'none' }}>
         {items.map((item) => (
           <div key={item.key} style={cell}>
             <dt>{item.label}</dt>
@@ -50,7 +50,13 @@ export function TitleBlock({ items, saved }: TitleBlockProps) {
       {saved === undefined ? null : (
         <div
           role="status"
-          style={{ ...cell, marginLeft: 'auto', borderRight: 0, borderLeft: `1px solid ${color.lineRule}` }}
+          style={{
+            ...cell,
+            marginLeft: 'auto',
+            flex: 'none',
+            borderRight: 0,
+            borderLeft: `1px solid ${color.lineRule}`,
+          }}
         >
           {saved}
         </div>
@@ -74,7 +80,7 @@ export function ContextStrip({ items, saved }: TitleBlockProps) {
         outlineOffset: -2,
       }}
     >
-      <dl style={{ display: 'flex' }}>
+      <dl style={{ display: 'flex', flex: 'none' }}>
         {items.map((item, place) => (
           <div
             key={item.key}
@@ -92,7 +98,7 @@ export function ContextStrip({ items, saved }: TitleBlockProps) {
         ))}
       </dl>
       {saved === undefined ? null : (
-        <div role="status" style={{ padding: '7px 12px', whiteSpace: 'nowrap' }}>
+        <div role="status" style={{ padding: '7px 12px', flex: 'none', whiteSpace: 'nowrap' }}>
           {saved}
         </div>
       )}

@@ -41,6 +41,7 @@ export function BigPlate({ part, verdict, level = 1, ...residue }: BigPlateProps
   const edge = edgeStyle[residue.evidence ?? 'observed'];
   const words = wordsForCode(residue.code);
   const colors = partColor(part);
+  const hasUnder = Boolean(residue.numbering || residue.organism || residue.evidence);
   const border = `${edge.width}px ${edge.borderStyle} ${color.lineControl}`;
   return (
     <div
@@ -79,11 +80,13 @@ export function BigPlate({ part, verdict, level = 1, ...residue }: BigPlateProps
             </div>
           )}
         </div>
-        <div style={under}>
-          {residue.numbering ? <span>{residue.numbering} numbering</span> : null}
-          {residue.organism ? <em>{residue.organism}</em> : null}
-          {residue.evidence ? <Evidence edge={residue.evidence} /> : null}
-        </div>
+        {hasUnder ? (
+          <div style={under}>
+            {residue.numbering ? <span>{residue.numbering} numbering</span> : null}
+            {residue.organism ? <em>{residue.organism}</em> : null}
+            {residue.evidence ? <Evidence edge={residue.evidence} /> : null}
+          </div>
+        ) : null}
       </div>
     </div>
   );

@@ -33,7 +33,7 @@ export function IssueRow({ issue, selected, onOpen }: IssueRowProps) {
   const tone = isError ? 'danger' : 'warn';
   const content = (
     <>
-      <span style={{ display: 'inline-flex', gap: 5, alignItems: 'center' }}>
+      <span style={{ display: 'inline-flex', gap: 5, alignItems: 'center', alignSelf: 'start' }}>
         <Icon of={isError ? CircleX : TriangleAlert} tone={tone} sizePixels={16} />
         <span style={{ font: `600 12px/20px ${face.text}`, color: isError ? color.danger : color.warn }}>
           {issue.severity}
