@@ -55,6 +55,7 @@ test('an install counts as whole only when every package has the version of the 
   const wanted = {
     '': { version: '1.0.0' },
     'node_modules/a': { version: '1.0.0' },
+    'node_modules/left-over': { version: '1.0.0', extraneous: true },
     'node_modules/other-system': { version: '1.0.0', optional: true },
   };
   expect(isInstalled(wanted, { 'node_modules/a': { version: '1.0.0' } })).toBe(true);
