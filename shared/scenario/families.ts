@@ -84,20 +84,15 @@ function clearKnownLabels(plan: FamilyPlan, organism: string, sites: Site[], let
   });
 }
 
-/** A signature that chance made a second time loses its first changeable residue to alanine or serine. */
+/** A signature that chance made beside the family's own loses one residue to valine (or leucine). */
 function clearExtraSignatures(plan: FamilyPlan, organism: string, sites: Site[], letters: string[]): void {
-  for (const match of letters.join('').matchAll(plan.signature)) {
-    const places = Array.from({ length: match[0].length }, (_, step) => match.index + step);
-    const required = new RegExp(plan.signature.source);
-    const changeable = places.find((place) => {
-      if (sites[place]?.fixed) return false;
-      const without = letters.slice(match.index, match.index + match[0].length);
-      without[place - match.index] = 'V';
-      return !required.test(without.join(''));
+  for (const { 0: text, index: start } of letters.join('').matchAll(plan.signature)) {
+    const breaking = [...text].findIndex((_, step) => {
+      const changed = `${text.slice(0, step)}V${text.slice(step + 1)}`;
+      return !sites[start + step]?.fixed && changed.search(plan.signature) < 0;
     });
-    const own = places.every((place) => changeable === undefined || place !== changeable);
-    if (own || changeable === undefined) continue;
-    letters[changeable] = isKnown(plan, organism, 'V', changeable) ? 'L' : 'V';
+    const place = start + breaking;
+    if (breaking >= 0) letters[place] = isKnown(plan, organism, 'V', place) ? 'L' : 'V';
   }
 }
 
