@@ -1,4 +1,6 @@
-import { hasErrors, type Issue, type ParseResult } from '../parse-result';
+import { IssueList } from '../issue-list';
+import type { ParseResult } from '../parse-result';
+import { linesOf } from '../text-file';
 import { IUPAC_BASES } from './bases';
 
 export interface DnaRecord {
@@ -13,72 +15,77 @@ export interface DnaRecord {
 }
 
 export interface DnaLimits {
+  /** Of all records together. */
   maxBases: number;
   maxRecords: number;
   maxNameLength: number;
-  /** Issues of one kind listed singly; the rest is counted. */
-  maxListed: number;
 }
 
-export const DNA_LIMITS: DnaLimits = {
-  maxBases: 500_000,
-  maxRecords: 1_000,
-  maxNameLength: 200,
-  maxListed: 20,
-};
+export const DNA_LIMITS: DnaLimits = { maxBases: 500_000, maxRecords: 1_000, maxNameLength: 200 };
 
-const PROTEIN_ONLY = /[EFILPQZJOX*]/gi;
-
-function error(code: string, message: string, line?: number, column?: number): Issue {
-  return { code, severity: 'error', message, ...(line ? { line } : {}), ...(column ? { column } : {}) };
-}
+/** Letters that are amino acids and no bases of any kind. */
+const PROTEIN_ONLY = /[EFILPQZJOX*]/i;
+/** More of them than this share: a protein was pasted (choice, no source). */
+const PROTEIN_SHARE = 0.1;
+const NAMES_LISTED = 20;
 
 function shown(text: string): string {
   return text.length > 40 ? `${text.slice(0, 40)}…` : text;
 }
 
-/** Numbered sequence text as databases print it: a heading, an end mark. */
+/** Heading and end mark of numbered sequence text as databases print it. */
 function isFrame(line: string): boolean {
-  return /^\s*(ORIGIN\s*|\/\/\s*)$/.test(line);
+  return /^\s*(ORIGIN|\/\/)\s*$/.test(line);
 }
 
+/** Characters no text has; a place beyond the first few thousand is found as an unknown base. */
+function isBinary(text: string): boolean {
+  for (let index = 0; index < Math.min(text.length, 4096); index += 1) {
+    const code = text.charCodeAt(index);
+    if (code === 0xfffd || (code < 32 && !(code >= 9 && code <= 13))) return true;
+  }
+  return false;
+}
+
+/** Gathers records line by line; what is unclear in the letters is told once, at the end. */
 class DnaReader {
-  readonly issues: Issue[] = [];
   readonly records: DnaRecord[] = [];
   private parts: string[] = [];
-  private unknown = 0;
-  private degenerate: { count: number; line: number; column: number; letters: Set<string> } | null = null;
-  private uracil: number | null = null;
   private total = 0;
+  private foreign = 0;
+  private uracil: { line: number; column: number } | null = null;
+  private degenerate: { line: number; column: number } | null = null;
+  private readonly degenerateLetters = new Map<string, number>();
 
-  constructor(private readonly limits: DnaLimits) {}
+  constructor(
+    private readonly limits: DnaLimits,
+    private readonly issues: IssueList,
+  ) {}
 
   title(text: string, line: number): void {
     this.finish();
+    const { maxNameLength } = this.limits;
     const [name = '', ...words] = text.trim().split(/\s+/);
-    if (name.length > this.limits.maxNameLength)
-      this.issues.push({
-        code: 'name-shortened',
-        severity: 'warning',
-        line,
-        message: `The name has ${name.length} characters; the first ${this.limits.maxNameLength} are kept.`,
-      });
-    const description = words.join(' ').slice(0, this.limits.maxNameLength);
-    this.records.push({ name: name.slice(0, this.limits.maxNameLength), description, bases: '', line });
+    if (name.length > maxNameLength)
+      this.issues.warning(
+        'name-shortened',
+        `The name has ${name.length} characters; the first ${maxNameLength} are kept.`,
+        { line },
+      );
+    const description = words.join(' ').slice(0, maxNameLength);
+    this.records.push({ name: name.slice(0, maxNameLength), description, bases: '', line });
   }
 
+  /** False when there are too many. */
   bases(text: string, line: number): boolean {
     if (this.records.length === 0) this.records.push({ name: '', description: '', bases: '', line });
     const clean = text.replace(/[\s\d]/g, '').toUpperCase();
     this.total += clean.length;
-    if (this.total > this.limits.maxBases) {
-      this.issues.push(
-        error(
-          'too-many-bases',
-          `More than ${this.limits.maxBases} bases; cut the part that is needed.`,
-          line,
-        ),
-      );
+    const { maxBases } = this.limits;
+    if (this.total > maxBases) {
+      this.issues.error('too-many-bases', `More than ${maxBases} bases; cut out the part that is needed.`, {
+        line,
+      });
       return false;
     }
     if (/[^ACGT]/.test(clean)) this.inspect(text, line);
@@ -90,22 +97,18 @@ class DnaReader {
     for (let index = 0; index < text.length; index += 1) {
       const letter = text.charAt(index).toUpperCase();
       if ('ACGT'.includes(letter) || /[\s\d]/.test(letter)) continue;
-      if (letter === 'U') this.uracil ??= line;
+      const place = { line, column: index + 1 };
+      if (letter === 'U') this.uracil ??= place;
       else if (letter in IUPAC_BASES) {
-        this.degenerate ??= { count: 0, line, column: index + 1, letters: new Set() };
-        this.degenerate.count += 1;
-        this.degenerate.letters.add(letter);
+        this.degenerate ??= place;
+        this.degenerateLetters.set(letter, (this.degenerateLetters.get(letter) ?? 0) + 1);
       } else {
-        this.unknown += 1;
-        if (this.unknown <= this.limits.maxListed)
-          this.issues.push(
-            error(
-              'unknown-base',
-              `"${text.charAt(index)}" is no base; allowed are A, C, G, T, U and the IUPAC letters.`,
-              line,
-              index + 1,
-            ),
-          );
+        if (PROTEIN_ONLY.test(letter)) this.foreign += 1;
+        this.issues.error(
+          'unknown-base',
+          `"${text.charAt(index)}" is no base; allowed are A, C, G, T, U and the IUPAC letters.`,
+          place,
+        );
       }
     }
   }
@@ -118,26 +121,21 @@ class DnaReader {
 
   end(): void {
     this.finish();
-    const hidden = this.unknown - this.limits.maxListed;
-    if (hidden > 0) this.issues.push(error('unknown-base', `${hidden} more characters are no bases.`));
-    if (this.uracil !== null)
-      this.issues.push({
-        code: 'uracil-read-as-thymine',
-        severity: 'warning',
-        line: this.uracil,
-        message: 'U is read as T.',
-      });
-    if (this.degenerate)
-      this.issues.push({
-        code: 'degenerate-bases',
-        severity: 'warning',
-        line: this.degenerate.line,
-        column: this.degenerate.column,
-        message: `${this.degenerate.count} bases are not settled (${[...this.degenerate.letters].sort().join(', ')}); codons that hold one read as X and no primer may cover one.`,
-      });
-    for (const record of this.records)
-      if (record.bases.length === 0)
-        this.issues.push(error('empty-record', `"${shown(record.name)}" has no bases.`, record.line));
+    if (this.foreign > this.total * PROTEIN_SHARE)
+      this.issues.error('looks-like-protein', 'This reads like a protein; paste the DNA that encodes it.');
+    if (this.uracil) this.issues.warning('uracil-read-as-thymine', 'U is read as T.', this.uracil);
+    if (this.degenerate) {
+      const count = [...this.degenerateLetters.values()].reduce((sum, each) => sum + each, 0);
+      const letters = [...this.degenerateLetters.keys()].sort().join(', ');
+      this.issues.warning(
+        'degenerate-bases',
+        `${count} bases are not settled (${letters}); codons that hold one read as X, and no primer may cover one.`,
+        this.degenerate,
+      );
+    }
+    for (const { name, bases, line } of this.records)
+      if (bases.length === 0) this.issues.error('empty-record', `"${shown(name)}" has no bases.`, { line });
+    if (this.records.length === 0) this.issues.error('empty', 'There is no sequence in it.');
   }
 }
 
@@ -149,46 +147,29 @@ class DnaReader {
  */
 export function readDnaRecords(text: string, limits: Partial<DnaLimits> = {}): ParseResult<DnaRecord[]> {
   const allowed = { ...DNA_LIMITS, ...limits };
-  const plain = text.replace(/^\uFEFF/, '');
-  const refuse = (issue: Issue): ParseResult<DnaRecord[]> => ({ value: null, issues: [issue] });
-  if (plain.trim() === '')
-    return refuse(error('empty', 'There is nothing to read; paste DNA or a FASTA record.'));
-  // eslint would read control characters as a mistake in a pattern; a file with them is no text.
-  for (let index = 0; index < Math.min(plain.length, 4096); index += 1) {
-    const code = plain.charCodeAt(index);
-    if (code === 0xfffd || (code < 32 && code !== 9 && code !== 10 && code !== 13 && code !== 12))
-      return refuse(error('binary', 'This is not a text file; export the DNA as FASTA.'));
-  }
-  const reader = new DnaReader(allowed);
-  const lines = plain.split(/\r\n|\r|\n/);
-  for (const [index, line] of lines.entries()) {
+  const issues = new IssueList();
+  const plain = text.startsWith('\uFEFF') ? text.slice(1) : text;
+  if (plain.trim() === '') issues.error('empty', 'There is nothing to read; paste DNA or a FASTA record.');
+  else if (isBinary(plain)) issues.error('binary', 'This is not a text file; export the DNA as FASTA.');
+  if (issues.hasErrors) return issues.result([]);
+  const reader = new DnaReader(allowed, issues);
+  for (const { number, text: line } of linesOf(plain)) {
     if (line.trim() === '' || line.startsWith(';') || isFrame(line)) continue;
-    if (line.startsWith('>')) {
-      if (reader.records.length >= allowed.maxRecords)
-        return refuse(error('too-many-records', `More than ${allowed.maxRecords} records.`, index + 1));
-      reader.title(line.slice(1), index + 1);
-    } else if (!reader.bases(line, index + 1)) break;
+    if (!line.startsWith('>')) {
+      if (!reader.bases(line, number)) break;
+    } else if (reader.records.length < allowed.maxRecords) reader.title(line.slice(1), number);
+    else {
+      issues.error('too-many-records', `More than ${allowed.maxRecords} records.`, { line: number });
+      break;
+    }
   }
   reader.end();
-  if (hasErrors(reader.issues)) {
-    const letters = lines
-      .filter((line) => !line.startsWith('>'))
-      .join('')
-      .replace(/[\s\d]/g, '');
-    const foreign = letters.match(PROTEIN_ONLY)?.length ?? 0;
-    if (foreign > letters.length / 10)
-      reader.issues.unshift(
-        error('looks-like-protein', 'This reads like a protein; paste the DNA that encodes it.'),
-      );
-    return { value: null, issues: reader.issues };
-  }
-  if (reader.records.length === 0) return refuse(error('empty', 'There is no sequence in it.'));
-  return { value: reader.records, issues: reader.issues };
+  return issues.result(reader.records);
 }
 
 /**
- * The one record of a construct. Besides the issues of `readDnaRecords`: `several-records` (error), which lists the names so that
- * one can be chosen, unless `name` chooses it; `record-not-found`.
+ * The one record of a construct, chosen by `name` when there are several. Besides the issues of `readDnaRecords`, errors:
+ * `several-records` (the names are listed, so that one can be chosen), `record-not-found`.
  */
 export function readDna(
   text: string,
@@ -196,32 +177,21 @@ export function readDna(
 ): ParseResult<DnaRecord> {
   const { value, issues } = readDnaRecords(text, options.limits);
   if (value === null) return { value: null, issues };
-  const names = value.map((record) => shown(record.name || 'without a name')).slice(0, DNA_LIMITS.maxListed);
+  const names = value.slice(0, NAMES_LISTED).map((record) => shown(record.name || 'without a name'));
   const more = value.length > names.length ? ` and ${value.length - names.length} more` : '';
-  const chosen = options.name === undefined ? value : value.filter((record) => record.name === options.name);
+  const list = `${names.join(', ')}${more}`;
+  const chosen = options.name === undefined ? value : value.filter(({ name }) => name === options.name);
   const [first, second] = chosen;
-  if (first === undefined)
-    return {
-      value: null,
-      issues: [
-        ...issues,
-        error(
-          'record-not-found',
-          `There is no record "${shown(options.name ?? '')}"; there are: ${names.join(', ')}${more}.`,
-        ),
-      ],
-    };
-  if (second !== undefined)
-    return {
-      value: null,
-      issues: [
-        ...issues,
-        error(
-          'several-records',
-          `${chosen.length} records where one is read; choose one: ${names.join(', ')}${more}.`,
-          second.line,
-        ),
-      ],
-    };
-  return { value: first, issues };
+  if (first && !second) return { value: first, issues };
+  const problem = second
+    ? {
+        code: 'several-records',
+        line: second.line,
+        message: `${chosen.length} records where one is read; choose one: ${list}.`,
+      }
+    : {
+        code: 'record-not-found',
+        message: `There is no record "${shown(options.name ?? '')}"; there are: ${list}.`,
+      };
+  return { value: null, issues: [...issues, { ...problem, severity: 'error' }] };
 }

@@ -11,10 +11,10 @@ import type { Design } from './types';
 function rankDesigns(groups: readonly Design[][], maxDesigns: number): Design[] {
   const byScore = (a: Design, b: Design) => a.score - b.score;
   const sorted = groups.map((group) => [...group].sort(byScore));
-  const leaders = sorted.flatMap((group) => group.slice(0, 1));
+  const leaders = sorted.flatMap((group) => group.slice(0, 1)).sort(byScore);
   const others = sorted.flatMap((group) => group.slice(1)).sort(byScore);
   return [...leaders, ...others]
-    .slice(0, Math.max(maxDesigns, leaders.length))
+    .slice(0, maxDesigns)
     .sort(byScore)
     .map((design, index) => ({ ...design, rank: index + 1 }));
 }
