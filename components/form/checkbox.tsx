@@ -14,7 +14,7 @@ export interface CheckboxProps {
 export function Checkbox({ label, hint, value, onChange, ...rest }: CheckboxProps) {
   const id = useId();
   return (
-    <div
+    <label
       style={{
         display: 'flex',
         gap: 10,
@@ -27,21 +27,20 @@ export function Checkbox({ label, hint, value, onChange, ...rest }: CheckboxProp
     >
       <input
         {...rest}
-        id={id}
         type="checkbox"
         checked={value}
         aria-describedby={hint ? `${id}-hint` : undefined}
         style={{ width: 20, height: 20, flex: 'none', accentColor: color.accent }}
         onChange={(event) => onChange(event.target.checked)}
       />
-      <div style={{ minWidth: 0 }}>
-        <label htmlFor={id}>{label}</label>
+      <span style={{ minWidth: 0 }}>
+        {label}
         {hint ? (
-          <p id={`${id}-hint`} style={{ color: color.inkSoft }}>
+          <span id={`${id}-hint`} style={{ display: 'block', color: color.inkSoft }}>
             {hint}
-          </p>
+          </span>
         ) : null}
-      </div>
-    </div>
+      </span>
+    </label>
   );
 }

@@ -20,11 +20,13 @@ const topBar: CSSProperties = {
 export function PhoneFrame({ places, currentPlace, phoneEnd, notice, children, fill }: FrameProps) {
   return (
     <>
-      <header style={topBar}>
-        <div ref={fill.title} style={{ flex: 1, minWidth: 0, display: 'flex', alignItems: 'center' }} />
-        {phoneEnd}
+      <header style={{ flex: 'none', minWidth: 0 }}>
+        <div style={topBar}>
+          <div ref={fill.title} style={{ flex: 1, minWidth: 0, display: 'flex', alignItems: 'center' }} />
+          {phoneEnd}
+        </div>
+        <div ref={fill.strip} />
       </header>
-      <div ref={fill.strip} style={{ flex: 'none', minWidth: 0 }} />
       <main
         id="main"
         tabIndex={-1}
@@ -39,8 +41,8 @@ export function PhoneFrame({ places, currentPlace, phoneEnd, notice, children, f
       >
         {notice}
         {children}
+        <div ref={fill.actions} className="no-print" style={{ flex: 'none' }} />
       </main>
-      <div ref={fill.actions} className="no-print" style={{ flex: 'none' }} />
       <nav
         aria-label="Places"
         style={{

@@ -1,7 +1,7 @@
 import type { CSSProperties } from 'react';
 import { color, face } from '@/components/theme';
 import { Icon, Link } from '@/components/ui';
-import { spokenPlace, type Place } from './place';
+import type { Place } from './place';
 
 const frame: CSSProperties = {
   position: 'relative',
@@ -55,7 +55,6 @@ export function PlaceLink({ place, current, mark }: PlaceLinkProps) {
   return (
     <Link
       href={place.href}
-      label={spokenPlace(place)}
       current={current ? 'page' : undefined}
       style={{
         ...frame,
@@ -66,7 +65,14 @@ export function PlaceLink({ place, current, mark }: PlaceLinkProps) {
       {current ? <span style={mark === 'top' ? markAtTop : markAtLeft} /> : null}
       <Icon of={place.icon} sizePixels={24} tone={current ? 'accent' : 'soft'} />
       {place.label}
-      {place.badge ? <span style={badge}>{place.badge}</span> : null}
+      {place.badge ? (
+        <>
+          <span aria-hidden style={badge}>
+            {place.badge}
+          </span>
+          <span className="sr-only">{`, ${place.badge} waiting`}</span>
+        </>
+      ) : null}
     </Link>
   );
 }

@@ -9,7 +9,3 @@ export interface Place {
   /** How much waits there; spoken with the place's name. */
   badge?: number;
 }
-
-/** `Threads`, or `Threads, 4 waiting`. */
-export const spokenPlace = (place: Place): string =>
-  place.badge ? `${place.label}, ${place.badge} waiting` : place.label;

@@ -111,7 +111,7 @@ export function WideFrame({ places, currentPlace, homeHref, project, locator, pe
         {notice}
         {children}
       </main>
-      <div ref={fill.block} style={{ minWidth: 0 }} />
+      <footer ref={fill.block} style={{ minWidth: 0 }} />
     </div>
   );
 }

@@ -21,18 +21,21 @@ export function FamilyTag({ family, part, size = 32, href }: FamilyTagProps) {
   const content = (
     <>
       <span style={plateBand(size, part, 'observed')} />
-      <b style={{ fontWeight: 700 }}>{family}</b>
+      <b aria-hidden style={{ fontWeight: 700 }}>
+        {family}
+      </b>
+      <span className="sr-only">{name}</span>
     </>
   );
   if (href) {
     return (
-      <Link href={href} label={name} className="plate plate-link" style={style}>
+      <Link href={href} className="plate plate-link" style={style}>
         {content}
       </Link>
     );
   }
   return (
-    <span className="plate" role="img" aria-label={name} style={style}>
+    <span className="plate" style={style}>
       {content}
     </span>
   );

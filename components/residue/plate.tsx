@@ -21,21 +21,21 @@ export function Plate({ part, size = 22, selected = false, href, onPress, ...res
   const content = (
     <>
       <span style={plateBand(size, part, evidence)} />
-      <span style={{ marginRight: '.42em', color: color.inkSoft }}>{residue.family}</span>
-      <b style={{ fontWeight: 700, textDecoration: residue.struck ? 'line-through 2px' : undefined }}>
+      <span aria-hidden style={{ marginRight: '.42em', color: color.inkSoft }}>
+        {residue.family}
+      </span>
+      <b
+        aria-hidden
+        style={{ fontWeight: 700, textDecoration: residue.struck ? 'line-through 2px' : undefined }}
+      >
         {shortLabel(residue)}
       </b>
+      <span className="sr-only">{name}</span>
     </>
   );
   if (href) {
     return (
-      <Link
-        href={href}
-        label={name}
-        className="plate plate-link"
-        style={style}
-        current={selected ? 'true' : undefined}
-      >
+      <Link href={href} className="plate plate-link" style={style} current={selected ? 'true' : undefined}>
         {content}
       </Link>
     );
@@ -46,7 +46,6 @@ export function Plate({ part, size = 22, selected = false, href, onPress, ...res
         type="button"
         className="plate plate-link"
         style={style}
-        aria-label={name}
         aria-pressed={selected}
         onClick={onPress}
       >
@@ -55,7 +54,7 @@ export function Plate({ part, size = 22, selected = false, href, onPress, ...res
     );
   }
   return (
-    <span className="plate" style={style} role="img" aria-label={name}>
+    <span className="plate" style={style}>
       {content}
     </span>
   );

@@ -45,7 +45,8 @@ function Letter({ letter, tints }: { letter: SequenceLetter; tints: boolean }) {
   const style = { ...cell, background: tints && chemistry ? `var(--chem-${chemistry})` : undefined };
   const content = (
     <>
-      {letter.code}
+      <span aria-hidden={letter.href ? true : undefined}>{letter.code}</span>
+      {letter.href ? <span className="sr-only">{`${name} ${letter.number}`}</span> : null}
       {chemistry ? <ChemistryCue chemistry={chemistry} /> : null}
       {letter.current ? (
         <>
@@ -59,12 +60,7 @@ function Letter({ letter, tints }: { letter: SequenceLetter; tints: boolean }) {
   );
   if (!letter.href) return <span style={style}>{content}</span>;
   return (
-    <Link
-      href={letter.href}
-      label={`${name} ${letter.number}`}
-      style={style}
-      current={letter.current ? 'true' : undefined}
-    >
+    <Link href={letter.href} style={style} current={letter.current ? 'true' : undefined}>
       {content}
     </Link>
   );

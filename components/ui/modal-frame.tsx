@@ -24,7 +24,6 @@ export function ModalFrame({ open, title, onClose, className, titleEnd, children
     dialog.showModal();
     return () => dialog.close();
   }, [open]);
-  if (!open) return null;
   return (
     <dialog
       ref={ref}
@@ -34,19 +33,23 @@ export function ModalFrame({ open, title, onClose, className, titleEnd, children
         event.preventDefault();
         onClose();
       }}
+      // Some browsers close on a second Esc without asking.
+      onClose={() => (open ? onClose() : undefined)}
       onClick={(event) => {
         if (event.target === event.currentTarget) onClose();
       }}
     >
-      <div className="modal-body">
-        <div style={{ display: 'flex', alignItems: 'center', gap: 12, justifyContent: 'space-between' }}>
-          <h2 id={titleId} style={{ font: `600 20px/26px ${face.text}`, color: color.ink }}>
-            {title}
-          </h2>
-          {titleEnd}
+      {open ? (
+        <div className="modal-body">
+          <div style={{ display: 'flex', alignItems: 'center', gap: 12, justifyContent: 'space-between' }}>
+            <h2 id={titleId} style={{ font: `600 20px/26px ${face.text}`, color: color.ink }}>
+              {title}
+            </h2>
+            {titleEnd}
+          </div>
+          {children}
         </div>
-        {children}
-      </div>
+      ) : null}
     </dialog>
   );
 }
