@@ -23,36 +23,37 @@ export const IUPAC_BASES: Readonly<Record<string, string>> = {
 const letters = 'ACGTRYSWKMBDHVNacgtryswkmbdhvn';
 const partners = 'TGCAYRSWMKVHDBNtgcayrswmkvhdbn';
 /** By character code; letters that are no bases stay. */
-const PARTNER_CODES = Uint16Array.from({ length: 128 }, (_, code) => code);
+const PARTNER_CODES = Uint8Array.from({ length: 128 }, (_, code) => code);
 for (const [index, letter] of [...letters].entries())
   PARTNER_CODES[letter.charCodeAt(0)] = partners.charCodeAt(index);
-/** As many codes as a call may take as arguments. */
-const CHUNK = 8192;
-
-function lettersOf(codes: Uint16Array): string {
-  let text = '';
-  for (let start = 0; start < codes.length; start += CHUNK)
-    text += String.fromCharCode(...codes.subarray(start, start + CHUNK));
-  return text;
+function partnerOf(letter: string): string {
+  const code = PARTNER_CODES[letter.charCodeAt(0)];
+  return code === undefined ? letter : String.fromCharCode(code);
 }
-
-function partnerCodes(bases: string): Uint16Array {
-  const codes = new Uint16Array(bases.length);
-  for (let index = 0; index < bases.length; index += 1) {
-    const code = bases.charCodeAt(index);
-    codes[index] = PARTNER_CODES[code] ?? code;
-  }
-  return codes;
-}
+const ascii = new TextDecoder('latin1');
 
 /** Complement of each letter in place, case kept; a letter that is no base stays. */
 export function complement(bases: string): string {
-  return lettersOf(partnerCodes(bases));
+  const codes = new Uint8Array(bases.length);
+  for (let index = 0; index < bases.length; index += 1) {
+    const code = PARTNER_CODES[bases.charCodeAt(index)];
+    // Text that is no DNA at all goes the slow way, letter by letter.
+    if (code === undefined) return [...bases].map(partnerOf).join('');
+    codes[index] = code;
+  }
+  return ascii.decode(codes);
 }
 
 /** The other strand read 5′→3′, case kept. Its own inverse for all 15 letters. */
 export function reverseComplement(bases: string): string {
-  return lettersOf(partnerCodes(bases).reverse());
+  const last = bases.length - 1;
+  const codes = new Uint8Array(bases.length);
+  for (let index = 0; index <= last; index += 1) {
+    const code = PARTNER_CODES[bases.charCodeAt(last - index)];
+    if (code === undefined) return [...bases].reverse().map(partnerOf).join('');
+    codes[index] = code;
+  }
+  return ascii.decode(codes);
 }
 
 /** Only A, C, G and T, upper case, and at least one. */

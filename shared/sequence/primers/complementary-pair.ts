@@ -2,21 +2,19 @@ import type { Issue, ParseResult } from '../parse-result';
 import { planCodons } from './codon-plan';
 import type { CodingChange, PrimerConstruct } from './construct';
 import { PAIR_LIMITS } from './limits';
-import { designWindow } from './pair-design';
+import { draftWindow, proveDraft, type PairDraft } from './pair-design';
 import { DEFAULT_PAIR_SETTINGS, type PairSettings } from './pair-settings';
 import { findWindows } from './pair-window';
 import type { Design } from './types';
 
+type Scored = { score: number };
+const byScore = (a: Scored, b: Scored) => a.score - b.score;
+
 /** Best of each choice of codons first, so that both are seen; the rest by score. */
-function rankDesigns(groups: readonly Design[][], maxDesigns: number): Design[] {
-  const byScore = (a: Design, b: Design) => a.score - b.score;
+function orderDrafts(groups: readonly PairDraft[][]): PairDraft[] {
   const sorted = groups.map((group) => [...group].sort(byScore));
   const leaders = sorted.flatMap((group) => group.slice(0, 1)).sort(byScore);
-  const others = sorted.flatMap((group) => group.slice(1)).sort(byScore);
-  return [...leaders, ...others]
-    .slice(0, maxDesigns)
-    .sort(byScore)
-    .map((design, index) => ({ ...design, rank: index + 1 }));
+  return [...leaders, ...sorted.flatMap((group) => group.slice(1)).sort(byScore)];
 }
 
 /**
@@ -54,10 +52,8 @@ export function designComplementaryPair(
         'Second places for the primers are looked for in the pasted DNA only; give the whole plasmid to see all.',
     });
 
-  const groups: Design[][] = [];
+  const groups: PairDraft[][] = [];
   const seen = new Set<string>();
-  let windowCount = 0;
-  let refused = 0;
   for (const rule of ['host', 'fewest'] as const) {
     const plan = planCodons(construct, changes, chosen.host, rule);
     if (rule === 'host') issues.push(...plan.issues);
@@ -65,27 +61,31 @@ export function designComplementaryPair(
     const key = plan.value.exchanges.map(({ codonTo }) => codonTo).join();
     if (seen.has(key)) continue;
     seen.add(key);
-    const windows = findWindows(construct, plan.value.exchanges, chosen.windowsTried);
-    windowCount += windows.length;
-    const { changes: planned } = plan.value;
-    const designs = windows.flatMap(
-      (window) => designWindow(construct, changes, planned, window, chosen) ?? [],
-    );
-    refused += windows.length - designs.length;
-    if (designs.length > 0) groups.push(designs);
+    const { changes: planned, exchanges } = plan.value;
+    const windows = findWindows(construct, exchanges, chosen.windowsTried);
+    groups.push(windows.map((window) => draftWindow(construct, planned, window, chosen)));
   }
-  if (windowCount === 0)
+  const drafts = orderDrafts(groups);
+  if (drafts.length === 0)
     return refuse(
       'too-near-the-end',
       `There are not ${PAIR_LIMITS.shortestArm} settled bases on both sides of the change; give more of the plasmid.`,
     );
+  const designs: Omit<Design, 'rank'>[] = [];
+  let refused = 0;
+  for (const draft of drafts) {
+    if (designs.length === chosen.maxDesigns) break;
+    const design = proveDraft(construct, changes, draft);
+    if (design) designs.push(design);
+    else refused += 1;
+  }
   if (refused > 0)
     issues.push({
       code: 'design-not-proved',
       severity: 'warning',
-      message: `${refused} of ${windowCount} designs were left out: their product, read back, is not surely the one asked for.`,
+      message: `${refused} designs were left out: their product, read back, is not surely the one asked for.`,
     });
-  if (groups.length === 0)
+  if (designs.length === 0)
     return refuse('no-design', 'No pair of primers could be proved to make this change and no other.');
-  return { value: rankDesigns(groups, chosen.maxDesigns), issues };
+  return { value: designs.sort(byScore).map((design, index) => ({ ...design, rank: index + 1 })), issues };
 }

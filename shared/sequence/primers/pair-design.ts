@@ -104,41 +104,41 @@ function reasonsOf(window: PairWindow, changes: readonly CodonChange[], checks: 
   ];
 }
 
-/** One design for one window; null when the product read back is not what was asked. */
-export function designWindow(
+/** A design whose product has not been read back yet. */
+export type PairDraft = Omit<Design, 'rank' | 'product' | 'encodes' | 'proved'>;
+
+/** One design for one window, with all figures and checks but the proof. */
+export function draftWindow(
   construct: PrimerConstruct,
-  changes: readonly CodingChange[],
   codons: readonly CodonChange[],
   window: PairWindow,
   settings: PairSettings,
-): Design | null {
+): PairDraft {
   const forward = makePrimer(construct, window, settings, 'F');
   const reverse = makePrimer(construct, window, settings, 'R');
   const primers = [forward.primer, reverse.primer];
   const checks = [...checkWindow(window), ...forward.checks, ...reverse.checks];
-  const { coding } = construct;
-  const proof = provePair(
-    {
-      bases: construct.bases,
-      circular: construct.circular,
-      coding,
-      asked: changes.map(({ codon, to }) => ({ codon, to })),
-    },
-    forward.primer.bases,
-    reverse.primer.bases,
-  );
-  if (!proof.proved) return null;
   return {
     scheme: 'complementary-pair',
-    rank: 0,
     score: scoreOf(window, codons, checks, primers),
     reasons: reasonsOf(window, codons, checks),
     changes: [...codons],
     primers,
-    product: proof.product,
-    encodes: proof.encodes,
-    proved: proof.proved,
     checks,
     withinLimits: checks.every(({ severity, passed }) => severity === 'advice' || passed),
   };
+}
+
+/** The draft with its product, or null when that, read back from the primers, is not what was asked. */
+export function proveDraft(
+  construct: PrimerConstruct,
+  changes: readonly CodingChange[],
+  draft: PairDraft,
+): Omit<Design, 'rank'> | null {
+  const [forward, reverse] = draft.primers;
+  const { bases, circular, coding } = construct;
+  const asked = changes.map(({ codon, to }) => ({ codon, to }));
+  const proof = provePair({ bases, circular, coding, asked }, forward?.bases ?? '', reverse?.bases ?? '');
+  const { product, encodes, proved } = proof;
+  return proved ? { ...draft, product, encodes, proved } : null;
 }

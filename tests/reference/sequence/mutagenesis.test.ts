@@ -8,7 +8,7 @@ import { placeChanges, preparePrimerConstruct, type CodingChange } from '@/share
 import { pairRuleCelsius } from '@/shared/sequence/primers/limits';
 import { meltingCelsius } from '@/shared/sequence/primers/melting';
 import { DEFAULT_MELTING_CONDITIONS } from '@/shared/sequence/primers/melting-conditions';
-import { designWindow } from '@/shared/sequence/primers/pair-design';
+import { draftWindow, proveDraft } from '@/shared/sequence/primers/pair-design';
 import { DEFAULT_PAIR_SETTINGS } from '@/shared/sequence/primers/pair-settings';
 import { growWindow } from '@/shared/sequence/primers/pair-window';
 import { readFixtureJson, readFixtureText } from '../../support/read-fixture';
@@ -74,11 +74,10 @@ describe.each(file.cases)('worked mutation $short', (worked) => {
   const window = growWindow(construct, [{ along, codonTo: worked.newCodon }], 15);
   const changes = changesOf(worked.short, coding);
   const change = changes[0];
-  const design =
+  const draft =
     window && change
-      ? designWindow(
+      ? draftWindow(
           construct,
-          changes,
           [
             {
               residueIndex: change.residueIndex,
@@ -97,6 +96,7 @@ describe.each(file.cases)('worked mutation $short', (worked) => {
           { ...DEFAULT_PAIR_SETTINGS, melting: CONDITION_C, name: worked.short },
         )
       : null;
+  const design = draft ? proveDraft(construct, changes, draft) : null;
 
   test('the pair of the same rule has the same letters, place and figures', () => {
     const [forward, reverse] = design?.primers ?? [];
