@@ -1,5 +1,6 @@
 // The linter's rules. A later block replaces a rule's options, so each rule is set in one place for each file.
 import { createTypeScriptImportResolver } from 'eslint-import-resolver-typescript';
+import { defineConfig } from 'eslint/config';
 import importX from 'eslint-plugin-import-x';
 import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
@@ -31,7 +32,7 @@ const colours = [
   },
 ];
 
-export default tseslint.config(
+export default defineConfig(
   {
     ignores: ['node_modules', '.data', '.expo', 'dist', 'coverage', 'tests/fixtures', 'expo-env.d.ts'],
   },
