@@ -12,7 +12,7 @@ export type Applied<Value> = Value | typeof outOfDate;
  * Takes a fact into a cached value. Pure and idempotent: the same value (by reference) when the fact says nothing
  * about it or nothing new.
  */
-export type Apply<Value> = (value: Value, fact: Fact) => Applied<Value>;
+export type Apply<Value> = (value: Value, fact: Fact, projectId: string) => Applied<Value>;
 
 /** The fact an event carries; null when this page doesn't know the kind or can't read it. */
 export function factOf(event: Pick<ProjectEvent, 'kind' | 'payload'>): Fact | null {
@@ -30,7 +30,7 @@ export function applyEvents<Value>(
   let now: Value = value;
   for (const event of events) {
     const fact = factOf(event);
-    const next = fact ? apply(now, fact) : outOfDate;
+    const next = fact ? apply(now, fact, event.projectId) : outOfDate;
     if (next === outOfDate) return outOfDate;
     now = next;
   }

@@ -9,7 +9,11 @@ const landingMilliseconds = 2000;
 
 /** From here on events are counted: what was read before may lack some. Not so the read that brought the number. */
 const counted = Symbol('counted from here');
-type Landed = Fact | typeof outOfDate | typeof counted;
+type Word = Fact | typeof outOfDate | typeof counted;
+interface Landed {
+  projectId: string;
+  word: Word;
+}
 type Live = LiveMeta['live'];
 
 /** One read under way, with what happened since it began. */
@@ -67,7 +71,8 @@ export class LiveCache {
     this.open.delete(read);
   }
 
-  tell(projectId: string, facts: readonly Landed[]): void {
+  tell(projectId: string, words: readonly Word[]): void {
+    const facts = words.map((word): Landed => ({ projectId, word }));
     for (const read of this.open) {
       if (read.projectId === null || read.projectId === projectId) read.facts.push(...facts);
     }
@@ -131,10 +136,10 @@ export class LiveCache {
 function applyAll(live: Live, value: unknown, facts: readonly Landed[]): unknown {
   let now = value;
   try {
-    for (const fact of facts) {
-      if (fact === counted && live.anchors) continue;
-      if (fact === counted || fact === outOfDate) return outOfDate;
-      now = live.apply(now, fact);
+    for (const { word, projectId } of facts) {
+      if (word === counted && live.anchors) continue;
+      if (word === counted || word === outOfDate) return outOfDate;
+      now = live.apply(now, word, projectId);
       if (now === outOfDate) return outOfDate;
     }
     return now;

@@ -4,7 +4,7 @@ import {
   type QueryFunctionContext,
   type QueryKey,
 } from '@tanstack/react-query';
-import type { Applied, Fact } from './facts';
+import type { Apply, Fact } from './facts';
 import { liveCacheOf, takeRead } from './live-cache';
 
 /** How a cached value follows the events of its project; kept beside the query. */
@@ -12,7 +12,7 @@ export interface LiveMeta extends Record<string, unknown> {
   live: {
     /** Null for what spans projects. */
     projectId: string | null;
-    apply: (value: unknown, fact: Fact) => unknown;
+    apply: (value: unknown, fact: Fact, projectId: string) => unknown;
     /** The read from which the project's event number is taken. */
     anchors?: boolean;
   };
@@ -22,7 +22,7 @@ interface LiveRead<Value> {
   projectId: string | null;
   queryKey: QueryKey;
   read: (signal: AbortSignal) => Promise<Value>;
-  apply: (value: Value, fact: Fact) => Applied<Value>;
+  apply: Apply<Value>;
   /** Joins what was read with what is held, where a read brings only a part. */
   merge?: (held: Value, fresh: Value) => Value;
   anchors?: boolean;
@@ -49,12 +49,8 @@ export function liveQuery<Value extends object>({ read, apply, merge, ...rest }:
   };
 }
 
-export function liveMeta<Value>(
-  projectId: string | null,
-  apply: (value: Value, fact: Fact) => Applied<Value>,
-  anchors = false,
-): LiveMeta {
-  return { live: { projectId, anchors, apply: (value, fact) => apply(value as Value, fact) } };
+export function liveMeta<Value>(projectId: string | null, apply: Apply<Value>, anchors = false): LiveMeta {
+  return { live: { projectId, anchors, apply: (value, fact, of) => apply(value as Value, fact, of) } };
 }
 
 /** Reads, and remembers the facts that land meanwhile. */

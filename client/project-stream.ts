@@ -79,7 +79,7 @@ export class ProjectStream {
         const reply = await this.tools.readEvents(after);
         if (this.stopped) return;
         failures = 0;
-        if (reply.readAfresh || reply.head < after) this.startAgain(reply.head, reply.readAfresh);
+        if (reply.readAfresh || reply.head < after) this.startAgain(reply.head, reply.head >= after);
         else this.take(reply.events);
         if (this.last < reply.head && this.last > after) this.wanted = true;
       } catch {

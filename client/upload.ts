@@ -8,7 +8,7 @@ import { addressOf, headersOf } from './request';
 
 export interface UploadRequest {
   projectId: string;
-  file: Blob & { name?: string };
+  file: Blob & { name?: string; lastModified?: number };
   fields: z.input<typeof newUploadBody>;
   idempotencyKey?: string;
   /** Bytes that left, 0 to 1. Null while it is not known. */

@@ -1,0 +1,2 @@
+export { applyToAlignment, applyToAlignments, type AlignmentWithRows } from './apply-alignment-event';
+export { useAlignment, useAlignments } from './use-alignments';

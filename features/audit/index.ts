@@ -1,0 +1,2 @@
+export { applyToAuditPages } from './apply-audit-event';
+export { useAudit, type AuditFilter } from './use-audit';

@@ -1,0 +1,2 @@
+export { applyToMap } from './apply-map-event';
+export { useConfirmReady, useDecideMap } from './use-maps';

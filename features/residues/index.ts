@@ -1,0 +1,2 @@
+export { applyToLocated, applyToPassport } from './apply-residue-event';
+export { useLocate, usePassport } from './use-residues';

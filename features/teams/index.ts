@@ -1,0 +1,1 @@
+export { useMakeTeam, useTeams } from './use-teams';

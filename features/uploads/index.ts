@@ -1,0 +1,2 @@
+export { applyToUpload, applyToUploads, withHint } from './apply-upload-event';
+export { useExcerpt, useMakeUpload, useUpload, useUploads, type MakeUpload } from './use-uploads';
