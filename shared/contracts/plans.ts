@@ -48,10 +48,17 @@ export const newConstructBody = z.strictObject({
 });
 
 export const check = z.object({
+  /** Stable, `pair-rule-melting`. */
   name: z.string(),
+  label: z.string(),
+  /** Which primer it is about; null for the pair. */
+  primer: z.string().nullable(),
+  /** A missed limit puts the design last; an advice only weighs in the ranking. */
+  severity: z.enum(['limit', 'advice']),
   passed: z.boolean(),
-  value: z.string(),
+  value: z.number().nullable(),
   limit: z.string(),
+  basis: z.string(),
 });
 export const primer = z.object({
   name: z.string(),
@@ -74,7 +81,10 @@ export const codonChange = z.object({
   codonStart: indexFromZero,
   codonFrom: z.string(),
   codonTo: z.string(),
-  share: z.number().nullable(),
+  changedBases: z.int(),
+  /** Share of the new codon among its synonyms in the host, 0 to 1. */
+  hostShare: z.number().nullable(),
+  chosenBy: z.enum(['host', 'fewest', 'both']),
 });
 export const design = z.object({
   id,
@@ -84,6 +94,7 @@ export const design = z.object({
   codons: z.array(codonChange),
   checks: z.array(check),
   reasons: z.array(z.string()),
+  withinLimits: z.boolean(),
   /** The product DNA was built from the primers, translated, and encodes the asked change and no other. */
   proved: z.boolean(),
   proof: z.string(),
@@ -126,8 +137,7 @@ export const newMutantBody = z.strictObject({
 });
 export const designBody = z.strictObject({
   constructId: id,
-  /** How the new codon is chosen: by the host's usage, or by fewest changed bases. */
-  codonChoice: z.enum(['host', 'fewest changes']),
+  /** Whose codon usage chooses the new codon. */
   host: z.enum(['ecoli', 'yeast']),
 });
 const mutantParams = z.strictObject({ projectId: id, mutantId: id });

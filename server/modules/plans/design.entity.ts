@@ -10,16 +10,11 @@ export class Design extends Made {
   @Ascii(24) scheme!: DesignContract['scheme'];
   @Column({ type: 'int', name: 'design_rank' }) rank!: number;
   @Json() settings!: unknown;
-  @Json() codons!: {
-    residueIndex: number;
-    codonStart: number;
-    codonFrom: string;
-    codonTo: string;
-    share: number | null;
-  }[];
+  @Json() codons!: (Omit<DesignContract['codons'][number], 'residue'> & { residueIndex: number })[];
   @Json() checks!: DesignContract['checks'];
   @Json() reasons!: string[];
   @Ascii(64) productHash!: string;
+  @Yes() withinLimits!: boolean;
   @Yes() proved!: boolean;
   @LongText() proof!: string;
   @Yes() chosen!: boolean;

@@ -1,0 +1,3 @@
+import { SignedInOnly } from '@/features/auth';
+
+export default SignedInOnly;

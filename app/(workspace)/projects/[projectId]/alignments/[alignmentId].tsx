@@ -1,0 +1,1 @@
+export { AlignmentScreen as default } from '@/features/alignments';

@@ -1,0 +1,1 @@
+export { LocateScreen as default } from '@/features/residues';

@@ -1,0 +1,1 @@
+export { MutantScreen as default } from '@/features/plans';

@@ -1,0 +1,1 @@
+export { ConstructScreen as default } from '@/features/plans';

@@ -1,0 +1,1 @@
+export { NewConstructScreen as default } from '@/features/plans';

@@ -1,0 +1,1 @@
+export { NewMutantScreen as default } from '@/features/plans';

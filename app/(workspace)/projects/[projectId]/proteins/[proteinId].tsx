@@ -1,0 +1,1 @@
+export { ProteinScreen as default } from '@/features/families';

@@ -1,0 +1,1 @@
+export { ResidueScreen as default } from '@/features/residues';

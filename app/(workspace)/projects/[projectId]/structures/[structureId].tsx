@@ -1,0 +1,1 @@
+export { StructureScreen as default } from '@/features/structures';

@@ -1,0 +1,1 @@
+export { ThreadScreen as default } from '@/features/threads';

@@ -1,0 +1,1 @@
+export { ThreadsScreen as default } from '@/features/threads';

@@ -1,0 +1,1 @@
+export { NewUploadScreen as default } from '@/features/uploads';

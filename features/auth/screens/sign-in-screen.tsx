@@ -1,0 +1,66 @@
+import { zodResolver } from '@hookform/resolvers/zod';
+import { Controller, useForm } from 'react-hook-form';
+import type { z } from 'zod';
+import { signInBody } from '@/shared/contracts/auth';
+import { TextInput } from '@/components/form';
+import { Button } from '@/components/ui';
+import { showFieldErrors } from '@/client/field-errors';
+import { signUpPath } from '@/client/paths';
+import { AccountForm } from '../components/account-form';
+import { useSignIn } from '../use-auth';
+import { useWayBack } from '../use-way-back';
+
+export function SignInScreen() {
+  const { back, leave } = useWayBack();
+  const signIn = useSignIn();
+  const { control, handleSubmit, setError } = useForm<z.input<typeof signInBody>>({
+    resolver: zodResolver(signInBody),
+    defaultValues: { email: '', password: '' },
+  });
+  if (leave) return leave;
+  const submit = handleSubmit((values) =>
+    signIn.mutate(values, {
+      onError: (error) => void showFieldErrors(error, ['email', 'password'], setError),
+    }),
+  );
+  return (
+    <AccountForm
+      title="Sign in"
+      onSubmit={() => void submit()}
+      problem={signIn.error}
+      other={{ question: 'New here?', label: 'Make an account', href: signUpPath(back) }}
+    >
+      <Controller
+        control={control}
+        name="email"
+        render={({ field, fieldState }) => (
+          <TextInput
+            label="E-mail"
+            type="email"
+            autoComplete="username"
+            required
+            {...field}
+            error={fieldState.error?.message}
+          />
+        )}
+      />
+      <Controller
+        control={control}
+        name="password"
+        render={({ field, fieldState }) => (
+          <TextInput
+            label="Password"
+            type="password"
+            autoComplete="current-password"
+            required
+            {...field}
+            error={fieldState.error?.message}
+          />
+        )}
+      />
+      <Button kind="primary" submit full busyText={signIn.isPending ? 'Signing in' : undefined}>
+        Sign in
+      </Button>
+    </AccountForm>
+  );
+}

@@ -1,0 +1,2 @@
+// prettier-ignore
+export const firstTables: string[] = [];

@@ -1,0 +1,1 @@
+export { addAuditRoutes } from './audit.routes';

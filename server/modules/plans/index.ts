@@ -1,0 +1,11 @@
+export { ConstructRevision } from './construct-revision.entity';
+export { Construct } from './construct.entity';
+export { ConstructService } from './construct.service';
+export { Design } from './design.entity';
+export { Mutant } from './mutant.entity';
+export { MutantService } from './mutant.service';
+export { Mutation } from './mutation.entity';
+export { PlanAccess } from './plan.access';
+export { PlanQueries } from './plan.queries';
+export { addPlanRoutes } from './plan.routes';
+export { Primer } from './primer.entity';

@@ -1,0 +1,6 @@
+export { Message } from './message.entity';
+export { SubjectDirectory, type ResolvedSubject, type SubjectResolver } from './subject.directory';
+export { Thread } from './thread.entity';
+export { ThreadQueries } from './thread.queries';
+export { addThreadRoutes } from './thread.routes';
+export { ThreadService } from './thread.service';
