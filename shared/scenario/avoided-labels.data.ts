@@ -1,7 +1,7 @@
 import type { ScenarioFamily } from './scenario-types';
 
 /**
- * Letter and number of residues known from the literature (handbook 2). No invented protein may carry one of them in its
+ * Letter and number of residues known from the literature (numbers recalled from it, as in the test fixture `landmarks.json`). No invented protein may carry one of them in its
  * own family, so that nobody can take the demo for a real organism.
  */
 const known: Record<ScenarioFamily, string> = {

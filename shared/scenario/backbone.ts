@@ -13,10 +13,10 @@ export interface BackboneResidue {
   CB: Xyz;
 }
 
-/** α-helix as observed on average (handbook 7.6): 3.635 residues a turn, 1.552 Å rise. */
+/** α-helix as observed on average: 3.635 residues a turn, 1.552 Å rise. */
 export const helixTorsions: Torsions = [-63, -42];
 
-// Lengths in Å and angles in degrees: Engh & Huber 1991 Acta Cryst A47:392, as listed with the handbook's ideal backbones.
+// Lengths in Å and angles in degrees: Engh & Huber 1991 Acta Cryst A47:392, from memory.
 const bond = { nToCa: 1.458, caToC: 1.525, cToN: 1.329, cToO: 1.231 };
 const angle = { nCaC: 111.0, caCN: 117.2, cNCa: 121.7, caCO: 120.1 };
 const transDegrees = 180;

@@ -26,10 +26,10 @@ export function makeConstruct(seed: number, alignments: ScenarioAlignment[]): Sc
   const encoded = tag + wildType.slice(1);
   const before = makeFlank(flankLengths.before, random);
   let written = before;
-  const codons = [...encoded, '*'].map((letter, place): ScenarioCodon => {
+  const codons = [...encoded, '*'].map((letter, place, letters): ScenarioCodon => {
     const index = place - tag.length + 1;
     const start = baseIndex(written.length);
-    const codon = drawCodon(letter, written, random);
+    const codon = drawCodon(letter, letters[place + 1] ?? '*', written, random);
     written += codon;
     return { start, bases: codon, letter, index: index >= 1 && letter !== '*' ? residueIndex(index) : null };
   });
@@ -51,15 +51,25 @@ export function makeConstruct(seed: number, alignments: ScenarioAlignment[]): Sc
   };
 }
 
-/** A codon drawn by its share in the host; rare ones left out, and those that make a long run with what is written. */
-function drawCodon(letter: string, written: string, random: Random): string {
-  const share = (codon: string) => ECOLI_CODON_SHARES[codon] ?? 0;
-  const common = codonsOf(letter, geneticCode).filter((codon) => share(codon) >= leastShare);
-  const smooth = common.filter((codon) => !longRun.test(written.slice(-longestRun) + codon));
+/**
+ * A codon drawn by its share in the host; rare ones left out, and those that make a long run of one base with what is written or
+ * leave the next residue no other way.
+ */
+function drawCodon(letter: string, next: string, written: string, random: Random): string {
+  const common = commonCodons(letter);
+  const smooth = common.filter((codon) => {
+    const grown = written + codon;
+    return runsOn(written, codon) && commonCodons(next).some((following) => runsOn(grown, following));
+  });
   const usable = smooth.length > 0 ? smooth : common;
-  let left = random.fraction() * usable.reduce((sum, codon) => sum + share(codon), 0);
-  return usable.find((codon) => (left -= share(codon)) <= 0) ?? usable[0] ?? 'NNN';
+  let left = random.fraction() * usable.reduce((sum, codon) => sum + shareOf(codon), 0);
+  return usable.find((codon) => (left -= shareOf(codon)) <= 0) ?? usable[0] ?? 'NNN';
 }
+
+const shareOf = (codon: string): number => ECOLI_CODON_SHARES[codon] ?? 0;
+const commonCodons = (letter: string): string[] =>
+  codonsOf(letter, geneticCode).filter((codon) => shareOf(codon) >= leastShare);
+const runsOn = (written: string, codon: string): boolean => !longRun.test(written.slice(-longestRun) + codon);
 
 /** Random bases, half G and C, without long runs and without repeats. */
 function makeFlank(length: number, random: Random): string {

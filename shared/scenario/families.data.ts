@@ -31,7 +31,7 @@ export interface FamilyPlan {
 
 const strandUnit = 'ssssssllhhhhhhhhhhll';
 
-/** Two membrane helices; the loop `R-[NQ]-P` faces the head, the carboxylate stands 20 residues after its R (handbook 2.6). */
+/** Two membrane helices; the loop `R-[NQ]-P` faces the head, the carboxylate stands 20 residues after its R, as in real c subunits. */
 const c: FamilyPlan = {
   family: 'c',
   part: 'rotor',

@@ -4,7 +4,7 @@ import type { ChainPlan, Piece, Stand } from './structure-plan.data';
 import { add, cross, dot, scale, subtract, turn, unit } from './vectors';
 
 const upward: Xyz = [0, 0, 1];
-/** Distance of Cα from the axis of an ideal helix, from its rise and turn (handbook 7.6) and Cα–Cα 3.81 Å. */
+/** Distance of Cα from the axis of an ideal helix, from its rise, its turn and Cα–Cα 3.81 Å. */
 const helixRadiusAngstrom = 2.29;
 
 /** Coordinates by residue index of the observed residues of one chain, ring axis on z. */
