@@ -19,5 +19,5 @@ export const DEFAULT_STRUCTURE_LIMITS: StructureLimits = {
   models: 10_000,
   headerEntries: 1_000_000,
   issuesPerCode: 20,
-  placementCells: 20_000_000,
+  placementCells: 60_000_000,
 };

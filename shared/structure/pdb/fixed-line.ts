@@ -31,7 +31,8 @@ export class FixedLines {
   /** A fixed decimal at the right of a field. */
   decimal(value: number, width: number, digits: number, what: string): string {
     // From 1e21 on, digits are written with an exponent.
-    if (!(Math.abs(value) < 1e20)) this.issues.error('not-a-number', `${what} ${value} cannot be written as a number.`);
+    if (!(Math.abs(value) < 1e20))
+      this.issues.error('not-a-number', `${what} ${value} cannot be written as a number.`);
     // A value that rounds to zero is written without a sign.
     const text = value.toFixed(digits).replace(/^-(0\.?0*)$/, '$1');
     return this.fit(text, width, what).padStart(width);
