@@ -64,6 +64,7 @@ export function AppShell(props: AppShellProps) {
   return (
     <ShellSlotsContext.Provider value={slots}>
       <div
+        className="frame"
         onKeyDown={walkPanes}
         style={{
           flex: 1,

@@ -21,7 +21,7 @@ export function Panes({ name, panes }: PanesProps) {
   const plan = planPanes(panes, layout.name, turn);
   if (plan.direction === 'below') {
     return (
-      <div style={{ flex: 1, minHeight: 0, overflowY: 'auto' }}>
+      <div className="frame" style={{ flex: 1, minHeight: 0, overflowY: 'auto' }}>
         {plan.shown.map((pane, place) => (
           <div key={pane.key} style={place === 0 ? undefined : { borderTop: `1px solid ${color.lineRule}` }}>
             <Pane label={pane.label} flat={pane.flat} stacked>
@@ -34,7 +34,7 @@ export function Panes({ name, panes }: PanesProps) {
   }
   const first = plan.shown[0];
   return (
-    <div style={{ flex: 1, minHeight: 0, display: 'flex', flexDirection: 'column' }}>
+    <div className="frame" style={{ flex: 1, minHeight: 0, display: 'flex', flexDirection: 'column' }}>
       {plan.turns.length > 0 && first ? (
         <Tabs
           label="What the first pane shows"
@@ -43,7 +43,7 @@ export function Panes({ name, panes }: PanesProps) {
           onChange={setTurn}
         />
       ) : null}
-      <div style={{ flex: 1, minHeight: 0 }}>
+      <div className="frame" style={{ flex: 1, minHeight: 0 }}>
         <Suspense fallback={null}>
           <Split key={plan.shown.map((pane) => pane.key).join('+')} name={name} panes={plan.shown} />
         </Suspense>

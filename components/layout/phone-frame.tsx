@@ -21,7 +21,7 @@ export function PhoneFrame({ places, currentPlace, phoneEnd, notice, children, f
   return (
     <>
       <header style={{ flex: 'none', minWidth: 0 }}>
-        <div style={topBar}>
+        <div className="no-print" style={topBar}>
           <div ref={fill.title} style={{ flex: 1, minWidth: 0, display: 'flex', alignItems: 'center' }} />
           {phoneEnd}
         </div>

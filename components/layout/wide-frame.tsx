@@ -61,7 +61,7 @@ function Project({ project }: { project: ProjectName }) {
 export function WideFrame({ places, currentPlace, homeHref, project, locator, people, ...rest }: FrameProps) {
   const { railFoot, notice, children, fill } = rest;
   return (
-    <div style={frame}>
+    <div className="frame" style={frame}>
       <nav aria-label="Places" style={rail}>
         <Link
           href={homeHref}
