@@ -57,13 +57,15 @@ function versionOf(request: Request): number {
   return Number(found[1]);
 }
 
-function clientRequestOf(request: Request, endpoint: Endpoint) {
+function clientRequestOf(request: Request, response: Response, endpoint: Endpoint) {
   const key = request.get('idempotency-key');
   if (key === undefined || endpoint.open) return null;
   if (!uuidPattern.test(key)) {
     throw new Refusal(400, 'bad-key', 'Cannot be read', 'Idempotency-Key is a UUID of your own.');
   }
-  const body = endpoint.encoding === 'form' ? '' : JSON.stringify(request.body ?? null);
+  // A form's file is not in the body: whoever took it in leaves its hash.
+  const file = endpoint.encoding === 'form' ? `${String(response.locals.fileHash)}\n` : '';
+  const body = `${file}${JSON.stringify(request.body ?? null)}`;
   return {
     key,
     hash: sha256(`${endpoint.name}\n${request.originalUrl}\n${request.get('if-match') ?? ''}\n${body}`),
@@ -87,7 +89,7 @@ export class Routes {
       const context = {
         requestId: String(request.id),
         actorId: personId || null,
-        clientRequest: clientRequestOf(request, endpoint),
+        clientRequest: clientRequestOf(request, response, endpoint),
       };
       const reply = await withRequestContext(context, async () => {
         const received = {

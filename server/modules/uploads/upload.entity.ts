@@ -4,6 +4,7 @@ import { Ascii, Exact, FileHash, Json, Made, Name, Uuid, UuidPrimary, Version } 
 
 @Entity('upload')
 @Index(['projectId', 'id'])
+@Index(['revisionId'])
 export class Upload extends Made {
   @UuidPrimary() id!: string;
   @ForeignKey('Project') @Uuid() projectId!: string;

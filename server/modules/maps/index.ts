@@ -1,0 +1,9 @@
+export { addMaps, type NewMap } from './map.adding';
+export { MapCandidate } from './map-candidate.entity';
+export { MapQueries } from './map.queries';
+export { addMapRoutes } from './map.routes';
+export { MapSegment } from './map-segment.entity';
+export { DecisionPlanner } from './map.planner';
+export { MapService, type SettleUpload } from './map.service';
+export { type ChainMapper, type MappedChain } from './chain-mapper';
+export { ResidueMap } from './residue-map.entity';
