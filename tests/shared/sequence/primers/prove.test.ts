@@ -28,6 +28,8 @@ test('the worked pair is proved', () => {
 });
 
 test('the same pair proves nothing else', () => {
+  expect(provePair({ ...task, asked: [{ codon: 60, to: 'E' }] }, forward, reverse).proved).toBe(false);
+  expect(provePair(task, forward, forward)).toMatchObject({ proved: false, product: '' });
   expect(codes({ asked: [{ codon: 60, to: 'E' }] })).toEqual(['change-missing']);
   expect(codes({ asked: [] })).toContain('other-residue-changed');
   expect(
