@@ -29,8 +29,9 @@ export const uploadPath = (projectId: string, uploadId: string) =>
   `${project(projectId)}/uploads/${uploadId}`;
 export const alignmentPath = (projectId: string, alignmentId: string) =>
   `${project(projectId)}/alignments/${alignmentId}`;
-export const structurePath = (projectId: string, structureId: string) =>
-  `${project(projectId)}/structures/${structureId}`;
+/** `chain`: author id of the chain that is open. */
+export const structurePath = (projectId: string, structureId: string, chain?: string) =>
+  withQuery(`${project(projectId)}/structures/${structureId}`, { chain });
 export const residuePath = (projectId: string, residue: { proteinId: string; residueIndex: number }) =>
   `${project(projectId)}/residues/${residue.proteinId}/${residue.residueIndex}`;
 export const threadsPath = (projectId: string) => `${project(projectId)}/threads`;

@@ -14,6 +14,7 @@
  *   IssueList    issues[{ key, severity, line?, column?, sentence, advice? }] label selectedKey? onOpen?
  *   StageScale   stage share? state? sentence? stages? label?
  *   Empty        title children action?                      Loading  children: what is being read
+ *   ReadView     of: a data hook's answer, what, children(value)   NothingHere  action?
  *   Person       name presence?                              Status   status
  *   CheckList    checks[{ result, name, value?, limit? }] label      Tally  cells[{ key, count, word, tone? }] label
  *   List         label rows keyOf children(row)              ListRow  lead? title detail? end? href? onPress? selected?
@@ -48,6 +49,7 @@ export {
 export { StageScale, stagePercent, uploadStages, type StageScaleProps } from './stage-scale';
 export { Empty, type EmptyProps } from './empty';
 export { Loading } from './loading';
+export { NothingHere, ReadView, type ReadState, type ReadViewProps } from './read-view';
 export { Person, initials, type PersonProps } from './person';
 export { Status, type StatusName } from './status';
 export { CheckList, CheckRow, type CheckResult, type CheckRowProps } from './check-row';
