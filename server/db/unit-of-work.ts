@@ -1,8 +1,8 @@
 import type { DataSource, EntityManager } from 'typeorm';
 import { busy, conflict } from '../lib/problem';
 import { ClientRequest } from './entities';
-import { requestContext } from './request-context';
-import { isConnectionLost, isDuplicate, isRetryable } from './transient-errors';
+import { requestContext } from '../lib/request-context';
+import { isConnectionLost, isDuplicate, isRetryable } from '../lib/database-errors';
 import { Unit, type AnnouncedEvent } from './unit';
 
 const attempts = 6;

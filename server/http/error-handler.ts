@@ -1,7 +1,7 @@
 import type {} from 'pino-http';
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Problem } from '../../shared/contracts';
-import { isConnectionLost } from '../db';
+import { isConnectionLost } from '../lib/database-errors';
 import { busy, Refusal } from '../lib/problem';
 
 const nothingMore = new Set(['entity.parse.failed', 'encoding.unsupported', 'charset.unsupported']);

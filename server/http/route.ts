@@ -2,7 +2,7 @@ import type {} from 'pino-http';
 import type { NextFunction, Request, RequestHandler, Response, Router } from 'express';
 import type { z } from 'zod';
 import type { Endpoint } from '../../shared/contracts';
-import { withRequestContext } from '../db';
+import { withRequestContext } from '../lib/request-context';
 import { sha256 } from '../lib/hash';
 import { Refusal } from '../lib/problem';
 import type { Authenticate } from './authenticate';

@@ -1,4 +1,4 @@
-import { withRequestContext } from '../db';
+import { withRequestContext } from '../lib/request-context';
 import type { Logger } from '../lib/log';
 import { LeaseLost, type ClaimedJob, type JobControl, type JobHandler } from './job-handler';
 import type { JobQueue, Progress } from './job-queue';

@@ -20,11 +20,12 @@ export class WorkerPool {
 
   constructor(memoryMegabytes: number, threads = 2) {
     this.pool = new Piscina({
-      filename: path.join(__dirname, 'workers', 'tasks.ts'),
+      filename: path.join(__dirname, 'workers', 'entry.cjs'),
       minThreads: 0,
       maxThreads: threads,
       idleTimeout: 30_000,
-      execArgv: ['--import', 'tsx'],
+      // The entry registers the TypeScript loader by itself; a second registration here is refused by Node 20.
+      execArgv: [],
       resourceLimits: { maxOldGenerationSizeMb: memoryMegabytes },
       recordTiming: false,
     });

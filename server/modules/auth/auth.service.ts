@@ -1,6 +1,7 @@
 import { IsNull } from 'typeorm';
 import type { Person as PersonContract } from '../../../shared/contracts';
-import { isDuplicate, type UnitOfWork } from '../../db';
+import type { UnitOfWork } from '../../db';
+import { isDuplicate } from '../../lib/database-errors';
 import { newId } from '../../lib/new-id';
 import { conflict, notFound, Refusal } from '../../lib/problem';
 import { hashPassword, passwordFits } from './password';

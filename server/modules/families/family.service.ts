@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { Family as FamilyContract, newFamilyBody } from '../../../shared/contracts';
-import { isDuplicate, type Unit, type UnitOfWork } from '../../db';
+import type { Unit, UnitOfWork } from '../../db';
+import { isDuplicate } from '../../lib/database-errors';
 import { newId } from '../../lib/new-id';
 import { conflict } from '../../lib/problem';
 import type { ProjectAccess } from '../projects';

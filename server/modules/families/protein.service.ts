@@ -1,7 +1,8 @@
 import type { z } from 'zod';
 import type { offsetNumberingBody, Protein as ProteinContract } from '../../../shared/contracts';
 import { offsetNumbering } from '../../../shared/sequence/numbering/numbering';
-import { isDuplicate, type Unit, type UnitOfWork } from '../../db';
+import type { Unit, UnitOfWork } from '../../db';
+import { isDuplicate } from '../../lib/database-errors';
 import { insertMany } from '../../db/insert-many';
 import { newId } from '../../lib/new-id';
 import { conflict, stale } from '../../lib/problem';
