@@ -59,8 +59,12 @@ export function readAlignmentJob(parts: Parts): JobHandler {
   });
 }
 
+/** A Latin binomial has its blank as an underscore in a row name, which ends at the first blank. */
+const binomial = /^[A-Z][a-z]+_[a-z]+$/;
+
 /** The organism is at first the row's name, without a range of residues at its end. */
 function protein({ name, residues, firstNumber }: ReadRow) {
-  const organism = firstNumber === undefined ? name : name.replace(/\/\d+-\d+$/, '');
+  const plain = firstNumber === undefined ? name : name.replace(/\/\d+-\d+$/, '');
+  const organism = binomial.test(plain) ? plain.replace('_', ' ') : plain;
   return { name, organism, residues, ...(firstNumber === undefined ? {} : { firstNumber }) };
 }

@@ -9,8 +9,9 @@ interface CopyRow {
   status: string;
   chainIndex: number | null;
   letter: string | null;
-  alternates: string;
-  exceptions: string;
+  /** JSON columns come parsed from the driver. */
+  alternates: number[];
+  exceptions: { kind: string; residueIndex: number | null }[];
   firstNumber: number | null;
   suffix: string | null;
   labelStart: number | null;
@@ -44,11 +45,9 @@ export class CopyQueries {
 }
 
 function presentCopy(row: CopyRow, residueIndex: number): ChainCopy {
-  const { structureId, structureName, chainId, authorId, chainIndex, letter } = row;
-  const exceptions = JSON.parse(row.exceptions) as { kind: string; residueIndex: number | null }[];
+  const { structureId, structureName, chainId, authorId, chainIndex, letter, exceptions, alternates } = row;
   const hasLabel = chainIndex !== null && row.firstNumber !== null && row.labelStart !== null;
   const number = hasLabel ? Number(row.firstNumber) + Number(chainIndex) - Number(row.labelStart) : null;
-  const alternates = JSON.parse(row.alternates) as number[];
   return {
     structureId,
     structureName,

@@ -112,7 +112,8 @@ const mismatch = ({ reading, found }: Candidate): boolean =>
 function present(candidate: Candidate, residue: ResidueLabel, pinCount: number): Reading {
   const { reading, found } = candidate;
   const says = reading.letter !== null && mismatch(candidate);
-  const where = found.isPreferred
+  const isShown = found.isPreferred || found.where === residue.numbering;
+  const where = isShown
     ? found.where
     : `${found.where} ${reading.label} is ${residue.numbering} ${residue.label}`;
   return {
