@@ -32,8 +32,12 @@ export const alignmentPath = (projectId: string, alignmentId: string) =>
 /** `chain`: author id of the chain that is open. */
 export const structurePath = (projectId: string, structureId: string, chain?: string) =>
   withQuery(`${project(projectId)}/structures/${structureId}`, { chain });
-export const residuePath = (projectId: string, residue: { proteinId: string; residueIndex: number }) =>
-  `${project(projectId)}/residues/${residue.proteinId}/${residue.residueIndex}`;
+/** `becomes`: the letter of a change that was typed, offered there to be planned. */
+export const residuePath = (
+  projectId: string,
+  residue: { proteinId: string; residueIndex: number },
+  becomes?: string | null,
+) => withQuery(`${project(projectId)}/residues/${residue.proteinId}/${residue.residueIndex}`, { becomes });
 export const threadsPath = (projectId: string) => `${project(projectId)}/threads`;
 export const threadPath = (projectId: string, subject: Subject) =>
   `${threadsPath(projectId)}/${subjectKey(subject)}`;

@@ -1,0 +1,58 @@
+import type { CSSProperties, HTMLAttributes } from 'react';
+import type { Reading } from '@/shared/contracts/residues';
+import { Plate, wordsForCode } from '@/components/residue';
+import { color, face } from '@/components/theme';
+import { Mark } from '@/components/ui';
+
+const pinWords = (count: number): string =>
+  count === 0 ? 'no pins' : `${count} ${count === 1 ? 'pin' : 'pins'}`;
+const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1);
+const frame = (on: boolean): CSSProperties => ({
+  display: 'grid',
+  gridTemplateColumns: 'minmax(84px, auto) minmax(0,1fr) auto',
+  gap: '2px 14px',
+  alignItems: 'center',
+  minHeight: 56,
+  padding: '7px 12px',
+  font: `400 14px/20px ${face.text}`,
+  cursor: 'pointer',
+  background: on ? color.accentSoft : undefined,
+  boxShadow: on ? `inset 3px 0 0 ${color.accent}` : undefined,
+});
+
+interface ReadingOptionProps {
+  reading: Reading;
+  highlighted: boolean;
+  /** What makes it an option of the list. */
+  option: HTMLAttributes<HTMLElement>;
+}
+
+/** One thing the text can mean: which residue, why it is a reading, how many pins are there. */
+export function ReadingOption({ reading, highlighted, option }: ReadingOptionProps) {
+  const { residue, mutationTo, mismatch, reason, pinCount } = reading;
+  return (
+    <div {...option} style={frame(highlighted)}>
+      <Plate
+        size={32}
+        family={residue.family}
+        part={residue.part}
+        code={residue.letter}
+        number={residue.label}
+        becomes={mutationTo ?? undefined}
+        numbering={residue.numbering}
+        organism={residue.organism}
+      />
+      <div style={{ minWidth: 0 }}>
+        <div>
+          <b>{capital(wordsForCode(residue.letter).name)}</b>{' '}
+          <span style={{ color: color.inkSoft }}>
+            {residue.numbering}, <em>{residue.organism}</em>
+          </span>
+        </div>
+        <div style={{ color: color.inkSoft }}>{reason}</div>
+        {mismatch ? <Mark tone="warn">{mismatch}</Mark> : null}
+      </div>
+      <span style={{ color: color.inkSoft, whiteSpace: 'nowrap' }}>{pinWords(pinCount)}</span>
+    </div>
+  );
+}
