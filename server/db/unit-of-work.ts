@@ -45,13 +45,11 @@ export class UnitOfWork {
         if (events.length > 0) this.publish(events);
         return reply;
       } catch (error) {
+        const hasKey = Boolean(requestContext()?.clientRequest);
         // A clash on the client's key means that the same request was just answered elsewhere: the retry finds it.
-        const clashed = isDuplicate(error) && requestContext()?.clientRequest != null && attempt === 0;
+        const clashed = isDuplicate(error) && hasKey && attempt === 0;
         // A lost connection may have been lost while committing: only a client's key makes trying again safe.
-        const again =
-          isRetryable(error) ||
-          clashed ||
-          (isConnectionLost(error) && requestContext()?.clientRequest != null);
+        const again = isRetryable(error) || clashed || (isConnectionLost(error) && hasKey);
         if (again && attempt + 1 < attempts) {
           await wait(attempt);
           continue;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { id, moment, personBrief, projectParams } from './common';
+import { moment, personBrief, projectParams } from './common';
 import { endpoint } from './endpoint';
 
 export const auditEntry = z.object({

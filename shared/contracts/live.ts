@@ -8,7 +8,7 @@ import { planEvents } from './plans';
 import { projectEvents, type ProjectEvent } from './projects';
 import { structureEvents } from './structures';
 import { threadEvents } from './threads';
-import { uploadEvents, uploadProgress } from './uploads';
+import { uploadEvents, type uploadProgress } from './uploads';
 
 /** Every project event and the shape of its payload. */
 export const eventKinds = {

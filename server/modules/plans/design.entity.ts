@@ -1,6 +1,6 @@
 import { Column, Entity, ForeignKey } from 'typeorm';
 import type { Design as DesignContract } from '../../../shared/contracts';
-import { Ascii, Int, Json, LongText, Made, Uuid, UuidPrimary, Yes } from '../../db/columns';
+import { Ascii, Json, LongText, Made, Uuid, UuidPrimary, Yes } from '../../db/columns';
 
 @Entity('design')
 export class Design extends Made {

@@ -1,8 +1,7 @@
 import { In } from 'typeorm';
 import type { Member, OwnProject, ProjectEvent } from '../../../shared/contracts';
-import type { UnitOfWork } from '../../db';
 import { ProjectEventRow, StreamHead } from '../../db/entities';
-import type { AnnouncedEvent } from '../../db';
+import type { AnnouncedEvent, UnitOfWork } from '../../db';
 import type { PeopleDirectory } from '../auth';
 import type { TeamDirectory } from '../teams';
 import { ProjectMember } from './project-member.entity';
