@@ -2,7 +2,7 @@ import { useMemo, useState, type KeyboardEvent, type ReactNode } from 'react';
 import { useLayout } from '@/components/theme';
 import { PhoneFrame } from './phone-frame';
 import type { Place } from './place';
-import { ShellSlotsContext, type ShellSlots } from './shell-slots';
+import { ShellSlotsContext, StandingWordsContext, type ShellSlots } from './shell-slots';
 import { WideFrame } from './wide-frame';
 
 export interface ProjectName {
@@ -28,6 +28,8 @@ export interface AppShellProps {
   phoneEnd?: ReactNode;
   /** A sentence about the line, above the page: away, updated. */
   notice?: ReactNode;
+  /** At the end of the title block of every screen: the line, invented data. */
+  standing?: ReactNode;
   children: ReactNode;
 }
 
@@ -63,30 +65,32 @@ export function AppShell(props: AppShellProps) {
   const Frame = hasRail ? WideFrame : PhoneFrame;
   return (
     <ShellSlotsContext.Provider value={slots}>
-      <div
-        className="frame"
-        onKeyDown={walkPanes}
-        style={{
-          flex: 1,
-          display: 'flex',
-          flexDirection: 'column',
-          minWidth: 0,
-          minHeight: 0,
-          height: '100%',
-        }}
-      >
-        <a
-          href="#main"
-          className="skip-link"
-          onClick={(event) => {
-            event.preventDefault();
-            skipToMain();
+      <StandingWordsContext.Provider value={props.standing}>
+        <div
+          className="frame"
+          onKeyDown={walkPanes}
+          style={{
+            flex: 1,
+            display: 'flex',
+            flexDirection: 'column',
+            minWidth: 0,
+            minHeight: 0,
+            height: '100%',
           }}
         >
-          Skip to the page
-        </a>
-        <Frame {...props} fill={fill} />
-      </div>
+          <a
+            href="#main"
+            className="skip-link"
+            onClick={(event) => {
+              event.preventDefault();
+              skipToMain();
+            }}
+          >
+            Skip to the page
+          </a>
+          <Frame {...props} fill={fill} />
+        </div>
+      </StandingWordsContext.Provider>
     </ShellSlotsContext.Provider>
   );
 }

@@ -1,7 +1,7 @@
 /*
  * The frame of the product.
  *   AppShell    places[{ key, label, icon, href, badge? }] currentPlace? homeHref project?{ name, detail?, href? } locator? people?
- *               railFoot? phoneEnd? notice? children. Once, around all screens of a project (an outlet that keeps only the
+ *               railFoot? phoneEnd? notice? standing? children. Once, around all screens of a project (an outlet that keeps only the
  *               present screen mounted).
  *   Screen      title backHref? phoneTools? items?[{ key, label, value }] saved? actions? kind? page or panes, narrow?
  *               children. Once in every screen: fills top bar, strip or title block, and the action bar of a phone.

@@ -3,7 +3,7 @@ import { createPortal } from 'react-dom';
 import ArrowLeft from 'lucide-react-native/icons/arrow-left';
 import { color, face } from '@/components/theme';
 import { IconButton } from '@/components/ui';
-import { useShellSlots } from './shell-slots';
+import { useShellSlots, useStandingWords } from './shell-slots';
 import { ContextStrip, TitleBlock, type TitleItem } from './title-block';
 
 export interface ScreenProps {
@@ -26,8 +26,16 @@ export interface ScreenProps {
 
 /** One screen within the frame: fills the bars around it and holds the page. */
 export function Screen(props: ScreenProps) {
-  const { title, backHref, phoneTools, items = [], saved, actions, kind = 'page', narrow, children } = props;
+  const { title, backHref, phoneTools, items = [], actions, kind = 'page', narrow, children } = props;
   const slots = useShellSlots();
+  const standing = useStandingWords();
+  const saved =
+    props.saved || standing ? (
+      <span style={{ display: 'inline-flex', alignItems: 'center', gap: 12 }}>
+        {props.saved}
+        {standing}
+      </span>
+    ) : undefined;
   const topBar = (
     <>
       {backHref ? (

@@ -1,4 +1,4 @@
-import { createContext, useContext } from 'react';
+import { createContext, useContext, type ReactNode } from 'react';
 
 /** The places of the frame that the screen within it fills. */
 export interface ShellSlots {
@@ -15,3 +15,7 @@ export interface ShellSlots {
 export const noSlots: ShellSlots = { title: null, strip: null, actions: null, block: null };
 export const ShellSlotsContext = createContext<ShellSlots>(noSlots);
 export const useShellSlots = (): ShellSlots => useContext(ShellSlotsContext);
+
+/** What every screen of the frame says at the end of its title block: the line, invented data. */
+export const StandingWordsContext = createContext<ReactNode>(null);
+export const useStandingWords = (): ReactNode => useContext(StandingWordsContext);

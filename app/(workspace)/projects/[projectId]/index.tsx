@@ -1,1 +1,1 @@
-export { FindScreen as default } from '@/features/projects';
+export { FindScreen as default } from '@/features/find';

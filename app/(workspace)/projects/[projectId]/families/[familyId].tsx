@@ -1,1 +1,1 @@
-export { FamilyScreen as default } from '@/features/families';
+export { FamilyScreen as default } from '@/features/find';

@@ -1,0 +1,1 @@
+export { ProjectFrame as default } from '@/features/find';

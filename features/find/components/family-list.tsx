@@ -1,0 +1,23 @@
+import type { Family } from '@/shared/contracts/families';
+import { FamilyTag, partWords } from '@/components/residue';
+import { List, ListRow } from '@/components/ui';
+import { familyPath } from '@/client/paths';
+
+const proteinWords = (count: number): string =>
+  count === 0 ? 'no proteins' : `${count} ${count === 1 ? 'protein' : 'proteins'}`;
+
+export function FamilyList({ projectId, families }: { projectId: string; families: readonly Family[] }) {
+  return (
+    <List label="Families" rows={families} keyOf={({ id }) => id}>
+      {({ id, name, part, description, proteinCount }) => (
+        <ListRow
+          href={familyPath(projectId, id)}
+          lead={<FamilyTag family={name} part={part} />}
+          title={description || partWords[part]}
+          detail={partWords[part]}
+          end={proteinWords(proteinCount)}
+        />
+      )}
+    </List>
+  );
+}

@@ -1,0 +1,43 @@
+import type { Upload } from '@/shared/contracts/uploads';
+import { Card, Link, Stack, StageScale, Text } from '@/components/ui';
+import { structurePath, uploadPath } from '@/client/paths';
+import { stageOf } from '@/features/uploads';
+
+const refusedWords = (errors: number): string =>
+  errors === 1
+    ? 'Refused with one error; nothing was stored.'
+    : `Refused with ${errors} errors; nothing was stored.`;
+
+/** Files on their way or refused: each with how far it is, and the page that says more. */
+export function UploadList({ projectId, uploads }: { projectId: string; uploads: readonly Upload[] }) {
+  return (
+    <ul aria-label="Uploads">
+      {uploads.map((upload) => {
+        const { stages, stage, share, state, sentence } = stageOf(upload);
+        const errors = upload.issues.filter(({ severity }) => severity === 'error').length;
+        const waits = state === 'waiting' && upload.structureId !== null;
+        return (
+          <li key={upload.id} style={{ paddingBottom: 8 }}>
+            <Card>
+              <Stack gap={8}>
+                <Link href={uploadPath(projectId, upload.id)}>{upload.fileName}</Link>
+                <StageScale
+                  stages={stages}
+                  stage={stage}
+                  share={share}
+                  state={state}
+                  sentence={state === 'refused' ? refusedWords(errors) : sentence}
+                  label={`Progress of ${upload.fileName}`}
+                />
+                {waits && upload.structureId ? (
+                  <Link href={structurePath(projectId, upload.structureId)}>Confirm its chains</Link>
+                ) : null}
+                <Text kind="meta" tone="soft">{`${upload.kind}, from ${upload.by.name}`}</Text>
+              </Stack>
+            </Card>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}

@@ -1,0 +1,3 @@
+export { ProjectFrame } from './project-frame';
+export { FindScreen } from './screens/find-screen';
+export { FamilyScreen } from './screens/family-screen';
