@@ -3,7 +3,6 @@ import { Banner } from './banner';
 import { Button } from './button';
 import { Empty } from './empty';
 import { Loading } from './loading';
-import { Stack } from './stack';
 
 /** A value that is being read, as a data hook gives it. */
 export interface ReadState<Value> {
@@ -27,10 +26,10 @@ export function ReadView<Value>({ of, what, children }: ReadViewProps<Value>) {
     return <ReadAgain of={of} />;
   }
   return (
-    <Stack gap={12}>
+    <>
       {of.error ? <ReadAgain of={of} /> : null}
       {children(of.data)}
-    </Stack>
+    </>
   );
 }
 

@@ -7,3 +7,4 @@ export {
   useRenameProtein,
   useSetOffsetNumbering,
 } from './use-families';
+export { familyOptions } from './family-options';

@@ -1,0 +1,46 @@
+import type { ChainMap } from '@/shared/contracts/maps';
+
+/** `98.7 %`; what is not whole never reads as 100. */
+export function percentWords(fraction: number): string {
+  const rounded = Math.round(fraction * 1000) / 10;
+  return `${fraction < 1 ? Math.min(99.9, rounded) : rounded} %`;
+}
+
+export const countWords = (count: number, one: string, many = `${one}s`): string =>
+  `${count === 0 ? 'no' : count} ${count === 1 ? one : many}`;
+
+/** How author numbers relate to places in the sequence, seen at both ends of the chain; null when it isn't one shift. */
+export function authorShift({
+  segments,
+  observedLength,
+  firstLabel,
+  lastLabel,
+}: Pick<ChainMap, 'segments' | 'observedLength' | 'firstLabel' | 'lastLabel'>): number | null {
+  const first = segments[0];
+  const last = segments.at(-1);
+  if (!first || !last || first.chainStart !== 0 || last.chainStart + last.length !== observedLength)
+    return null;
+  if (!/^-?\d+$/.test(firstLabel) || !/^-?\d+$/.test(lastLabel)) return null;
+  const atFirst = Number(firstLabel) - (first.proteinStart + 1);
+  const atLast = Number(lastLabel) - (last.proteinStart + last.length);
+  return atFirst === atLast ? atFirst : null;
+}
+
+/** The same in words. */
+export function shiftWords(shift: number): string {
+  if (shift === 0) return 'equal the place in the sequence, at both ends';
+  return `place in the sequence ${shift > 0 ? 'plus' : 'minus'} ${Math.abs(shift)}, at both ends`;
+}
+
+/** The stretch of the protein a chain lies on, places from 1, with its gaps: `2 to 79 of 81, 1 gap`. */
+export function stretchWords(segments: ChainMap['segments'], proteinLength: number | null): string {
+  const first = segments[0];
+  const last = segments.at(-1);
+  if (!first || !last || proteinLength === null) return 'nothing';
+  const ends = `${first.proteinStart + 1} to ${last.proteinStart + last.length} of ${proteinLength}`;
+  const gaps = segments.filter((segment, at) => {
+    const before = segments[at - 1];
+    return before !== undefined && before.proteinStart + before.length < segment.proteinStart;
+  }).length;
+  return gaps === 0 ? ends : `${ends}, ${countWords(gaps, 'gap')}`;
+}

@@ -1,0 +1,52 @@
+import type { Family } from '@/shared/contracts/families';
+import { FamilyTag } from '@/components/residue';
+import { List, ListRow, Text } from '@/components/ui';
+import { StandingMark, type ChainGroup } from '@/features/maps';
+import { chainSentence } from '../chain-words';
+
+export interface ChainsProps {
+  groups: readonly ChainGroup[];
+  families: ReadonlyMap<string, Family>;
+  openKey: string | undefined;
+  onOpen: (group: ChainGroup) => void;
+}
+
+export function FamilyOf({ family }: { family: Family | undefined }) {
+  if (!family)
+    return (
+      <Text kind="small" tone="soft">
+        none
+      </Text>
+    );
+  return <FamilyTag family={family.name} part={family.part} />;
+}
+
+/** Chains of a structure as rows with a sentence, for a narrow screen. */
+export function ChainList({ groups, families, openKey, onOpen }: ChainsProps) {
+  return (
+    <List label="Chains" rows={groups} keyOf={({ key }) => key}>
+      {(group) => (
+        <ListRow
+          lead={<FamilyOf family={families.get(group.first.familyId ?? '')} />}
+          title={
+            <>
+              <Text mono strong>
+                {group.names}
+              </Text>{' '}
+              {group.chains.length > 1 ? <Text tone="soft">{`${group.chains.length} chains`}</Text> : null}
+            </>
+          }
+          detail={
+            <>
+              {group.first.organism ? <i>{group.first.organism}. </i> : null}
+              {chainSentence(group)}
+            </>
+          }
+          end={<StandingMark group={group} />}
+          selected={group.key === openKey}
+          onPress={() => onOpen(group)}
+        />
+      )}
+    </List>
+  );
+}

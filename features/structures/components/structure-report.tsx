@@ -1,0 +1,84 @@
+import type { ReactNode } from 'react';
+import type { StructureWithChains } from '@/shared/contracts/structures';
+import { PageTitle } from '@/components/layout';
+import { useLayout } from '@/components/theme';
+import { Banner, Caption, IssueList, Row, Stack, StageScale, Text, Time } from '@/components/ui';
+import { countOf, countWords, standings } from '@/features/maps';
+import { ChainList, type ChainsProps } from './chain-list';
+import { ChainTable } from './chain-table';
+
+interface StructureReportProps extends ChainsProps {
+  structure: StructureWithChains;
+  mayConfirm: boolean;
+  problem: string | null;
+  /** The main button, on a wide screen. */
+  confirm: ReactNode;
+}
+
+/** A structure, how far its map is confirmed, and its chains in the order in which they need a person. */
+export function StructureReport(props: StructureReportProps) {
+  const { structure, mayConfirm, problem, confirm, groups } = props;
+  const { hasRail } = useLayout();
+  const { name, revision, title, fileName, by, at, waiting, chains, issues } = structure;
+  const proteinCount = chains.filter(({ status }) => status !== null).length;
+  const share = proteinCount === 0 ? 0 : (proteinCount - waiting) / proteinCount;
+  const isDone = waiting === 0;
+  const counts = standings
+    .map((standing) => ({ standing, count: countOf(groups, standing) }))
+    .filter(({ count }) => count > 0)
+    .map(({ standing, count }) => `${count} ${wordOf[standing]}`)
+    .join(', ');
+  return (
+    <Stack gap={16}>
+      <div>
+        <PageTitle>{`${name}, revision ${revision}`}</PageTitle>
+        {title ? <Text>{title}</Text> : null}
+        <Text kind="small" tone="soft">
+          {fileName} · uploaded by {by.name}, <Time iso={at} />
+        </Text>
+      </div>
+      <StageScale
+        stage={isDone ? 'done' : 'confirm'}
+        share={share}
+        state={isDone ? 'done' : 'waiting'}
+        label="Map of the chains"
+        sentence={isDone ? undefined : waitingWords(waiting, mayConfirm)}
+      />
+      {problem ? <Banner kind="danger">{problem}</Banner> : null}
+      {hasRail && confirm ? <Row>{confirm}</Row> : null}
+      <Stack gap={4}>
+        <Caption count={counts}>Chains</Caption>
+        {hasRail ? <ChainTable {...props} /> : <ChainList {...props} />}
+      </Stack>
+      {issues.length > 0 ? (
+        <Stack gap={4}>
+          <Caption count={countWords(issues.length, 'warning')}>Found while reading</Caption>
+          <IssueList
+            label="Found while reading"
+            issues={issues.map(({ severity, line, column, message }, place) => ({
+              key: String(place),
+              severity,
+              line,
+              column,
+              sentence: message,
+            }))}
+          />
+        </Stack>
+      ) : null}
+    </Stack>
+  );
+}
+
+const wordOf: Record<(typeof standings)[number], string> = {
+  choose: 'to choose',
+  look: 'to look at',
+  ready: 'ready',
+  decided: 'decided',
+  'left out': 'left out',
+  'no protein': 'no protein',
+};
+
+function waitingWords(waiting: number, mayConfirm: boolean): string {
+  const who = mayConfirm ? 'you, or another curator' : 'a curator';
+  return `${countWords(waiting, 'protein chain')} ${waiting === 1 ? 'waits' : 'wait'} for ${who}.`;
+}
