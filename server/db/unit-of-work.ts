@@ -1,8 +1,10 @@
+import { AsyncLocalStorage } from 'node:async_hooks';
 import type { DataSource, EntityManager } from 'typeorm';
 import { busy, conflict } from '../lib/problem';
 import { ClientRequest } from './entities';
 import { requestContext } from '../lib/request-context';
 import { isConnectionLost, isDuplicate, isRetryable } from '../lib/database-errors';
+import { ProjectTurns } from './project-turns';
 import { Unit, type AnnouncedEvent } from './unit';
 
 const attempts = 6;
@@ -25,6 +27,8 @@ export type Publish = (events: readonly AnnouncedEvent[]) => void;
  */
 export class UnitOfWork {
   private publish: Publish = () => {};
+  private readonly turns = new ProjectTurns();
+  private readonly inside = new AsyncLocalStorage<EntityManager>();
 
   constructor(private readonly source: DataSource) {}
 
@@ -32,18 +36,24 @@ export class UnitOfWork {
     this.publish = publish;
   }
 
-  /** Reads outside a unit. */
+  /**
+   * For reading. Inside a unit it is the unit's own connection: a second one taken there would make units wait for
+   * each other for ever as soon as they hold the whole pool, and would not see what the unit has written.
+   */
   get reader(): EntityManager {
-    return this.source.manager;
+    return this.inside.getStore() ?? this.source.manager;
   }
 
   /** `work` returns what is answered; asked again under the same client key, the same is answered without working. */
   async write<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>): Promise<T> {
     for (let attempt = 0; ; attempt += 1) {
       try {
-        const { reply, events } = await this.once(scope, work);
-        if (events.length > 0) this.publish(events);
-        return reply;
+        return await this.turns.take(scope.projectId, async () => {
+          const { reply, events } = await this.once(scope, work);
+          // Still in its turn, so that events go out in the order of their numbers.
+          if (events.length > 0) this.publish(events);
+          return reply;
+        });
       } catch (error) {
         const hasKey = Boolean(requestContext()?.clientRequest);
         // A clash on the client's key means that the same request was just answered elsewhere: the retry finds it.
@@ -87,7 +97,7 @@ export class UnitOfWork {
         }
         if (known) return { reply: known.reply as T, events: [] };
       }
-      const reply = await work(unit);
+      const reply = await this.inside.run(manager, () => work(unit));
       await unit.seal();
       if (clientRequest) {
         await manager.insert(ClientRequest, {
