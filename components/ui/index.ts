@@ -20,6 +20,7 @@
  *   List         label rows keyOf children(row)              ListRow  lead? title detail? end? href? onPress? selected?
  *   Table        caption columns[{ key, header, cell, numeric?, rowHeader?, sorted?, onSort? }] rows keyOf selectedKey?
  *   KeyValueList of KeyValueRow name value mono? strong?
+ *   BothTexts    sentence rows[{ key, name, theirs, mine }] onTakeTheirs onKeepMine busyText?   (after a conflict)
  *   Dialog       open title onClose actions?                 Sheet  open title onClose
  *   Key, Time iso form?, Markdown text linkify?, Logo
  */
@@ -36,6 +37,7 @@ export { Tabs, type TabItem, type TabsProps } from './tabs';
 export { Segment, type SegmentProps } from './segment';
 export { Choice, type ChoiceOption, type ChoiceProps } from './choice';
 export { Banner, type BannerKind, type BannerProps } from './banner';
+export { BothTexts, type BothTextsProps } from './both-texts';
 export { Mark, type MarkProps } from './mark';
 export { Toast, type ToastProps } from './toast';
 export {

@@ -1,0 +1,103 @@
+import { useEffect, useState } from 'react';
+import { zodResolver } from '@hookform/resolvers/zod';
+import { Controller, useForm } from 'react-hook-form';
+import type { z } from 'zod';
+import { project as projectSchema, projectSettingsBody, type Project } from '@/shared/contracts/projects';
+import { Checkbox, TextInput } from '@/components/form';
+import { Banner, BothTexts, Button, Stack } from '@/components/ui';
+import { showFieldErrors } from '@/client/field-errors';
+import { conflictOf } from '@/client/problem';
+import { useChangeProject } from '../use-projects';
+
+type Settings = z.input<typeof projectSettingsBody>;
+const settingsOf = ({ name, readersMayComment }: Project): Settings => ({ name, readersMayComment });
+const commentWords = (may: boolean) => (may ? 'readers may comment' : 'readers only read');
+
+/** The project's settings. They are saved against the version that was shown, never against one that came meanwhile. */
+export function SettingsForm({ project }: { project: Project }) {
+  const change = useChangeProject(project.id);
+  const [base, setBase] = useState(project);
+  const form = useForm<Settings>({
+    resolver: zodResolver(projectSettingsBody),
+    defaultValues: settingsOf(project),
+  });
+  const { control, handleSubmit, setError, reset, getValues } = form;
+  const { isDirty } = form.formState;
+  const startFrom = (next: Project) => {
+    setBase(next);
+    reset(settingsOf(next));
+  };
+  // A form nobody has touched shows what is true now.
+  useEffect(() => {
+    if (isDirty || project.version <= base.version) return;
+    setBase(project);
+    reset(settingsOf(project));
+  }, [project, isDirty, base.version, reset]);
+  const send = (version: number) => (body: Settings) =>
+    change.mutate(
+      { version, body },
+      {
+        onSuccess: startFrom,
+        onError: (error) => void showFieldErrors(error, ['name'], setError),
+      },
+    );
+  const theirs = conflictOf(change.error, projectSchema);
+  const mine = getValues();
+  const busyText = change.isPending ? 'Saving' : undefined;
+  return (
+    <form
+      noValidate
+      onSubmit={(event) => {
+        event.preventDefault();
+        void handleSubmit(send(base.version))();
+      }}
+    >
+      <Stack gap={16}>
+        {change.error && !theirs ? <Banner kind="danger">{change.error.message}</Banner> : null}
+        {change.isSuccess && !isDirty ? <Banner kind="good">Saved.</Banner> : null}
+        <Controller
+          control={control}
+          name="name"
+          render={({ field, fieldState }) => (
+            <TextInput label="Name of the project" required {...field} error={fieldState.error?.message} />
+          )}
+        />
+        <Controller
+          control={control}
+          name="readersMayComment"
+          render={({ field }) => (
+            <Checkbox
+              label="Readers may comment"
+              hint="They then write in threads; everything else stays read only for them."
+              {...field}
+            />
+          )}
+        />
+        {theirs ? (
+          <BothTexts
+            sentence="Somebody changed these settings meanwhile."
+            rows={[
+              { key: 'name', name: 'Name', theirs: theirs.name, mine: mine.name },
+              {
+                key: 'comment',
+                name: 'Readers',
+                theirs: commentWords(theirs.readersMayComment),
+                mine: commentWords(mine.readersMayComment),
+              },
+            ]}
+            onTakeTheirs={() => {
+              change.reset();
+              startFrom(theirs);
+            }}
+            onKeepMine={() => void handleSubmit(send(theirs.version))()}
+            busyText={busyText}
+          />
+        ) : (
+          <Button kind="primary" submit busyText={busyText}>
+            Save the settings
+          </Button>
+        )}
+      </Stack>
+    </form>
+  );
+}
