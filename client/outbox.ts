@@ -1,8 +1,8 @@
 import { threads, type Subject } from '@/shared/contracts/threads';
-import { call } from './api';
+import { call, type Api } from './api';
 import { drafts } from './drafts';
 import { Emitter } from './emitter';
-import { liveProjects } from './live-projects';
+import { liveProjects, type LiveProjects } from './live-projects';
 import { newId } from './new-id';
 import { asApiProblem } from './problem';
 import {
@@ -223,13 +223,18 @@ function keyOf(account: string, clientKey: string): string {
   return `outbox/${account}/${clientKey}`;
 }
 
-export const outbox = new Outbox({
-  storage,
-  async send({ projectId, clientKey, subject, text }) {
+/** Sends over HTTP; what the reply says is taken in as the event will be. */
+export function sendOver(call: Api['call'], live: Pick<LiveProjects, 'tell'>): OutboxTools['send'] {
+  return async ({ projectId, clientKey, subject, text }) => {
     const body = { clientKey, subject, text };
     const posted = await call(threads.post, { params: { projectId }, body, idempotencyKey: clientKey });
-    liveProjects.tell(projectId, [{ kind: 'message.posted', payload: posted }]);
-  },
+    live.tell(projectId, [{ kind: 'message.posted', payload: posted }]);
+  };
+}
+
+export const outbox = new Outbox({
+  storage,
+  send: sendOver(call, liveProjects),
   giveBack: (account, message) => drafts.giveBack(account, composerPlace(message), message),
   locks: typeof navigator === 'undefined' ? undefined : navigator.locks,
 });

@@ -1,41 +1,43 @@
-import { access } from './access';
-import { liveProjects } from './live-projects';
-import { outbox } from './outbox';
+import type { QueryClient } from '@tanstack/react-query';
+import { access, type Access } from './access';
+import { liveProjects, type LiveProjects } from './live-projects';
+import { outbox, type Outbox } from './outbox';
 import { forgetEverything, queryClient } from './query-client';
-import { realtime } from './realtime';
+import { realtime, type Realtime } from './realtime';
 import { session } from './session';
 
-let lastPersonId: string | null = null;
-let started = false;
+/** What belongs to one page of one person. */
+export interface ClientParts {
+  access: Access;
+  realtime: Realtime;
+  liveProjects: LiveProjects;
+  outbox: Outbox;
+  queryClient: QueryClient;
+}
 
-/** Follows who is signed in: the socket, the outbox and what is held belong to one person. */
-function follow(): void {
-  const now = access.read();
-  if (now.status === 'signed in') {
-    if (lastPersonId !== null && lastPersonId !== now.person.id) forget();
-    lastPersonId = now.person.id;
-    realtime.start();
-    void outbox.open(now.person.id);
-  }
-  if (now.status === 'signed out') {
+/** Joins them: the socket, the outbox and what is held follow who is signed in, and facts settle what was sent. */
+export function joinParts({ access, realtime, liveProjects, outbox, queryClient }: ClientParts): void {
+  let lastPersonId: string | null = null;
+  const forget = () => {
     realtime.stop();
-    outbox.close();
-    // Run out while at work: the same person mostly comes back to the same page.
-    if (!now.expired) forget();
-  }
-}
-
-function forget(): void {
-  realtime.stop();
-  liveProjects.reset();
-  forgetEverything(queryClient);
-}
-
-/** Once, when the page opens. */
-export function startClient(): void {
-  if (started) return;
-  started = true;
-  access.subscribe(follow);
+    liveProjects.reset();
+    forgetEverything(queryClient);
+  };
+  access.subscribe(() => {
+    const now = access.read();
+    if (now.status === 'signed in') {
+      if (lastPersonId !== null && lastPersonId !== now.person.id) forget();
+      lastPersonId = now.person.id;
+      realtime.start();
+      void outbox.open(now.person.id);
+    }
+    if (now.status === 'signed out') {
+      realtime.stop();
+      outbox.close();
+      // Run out while at work: the same person mostly comes back to the same page.
+      if (!now.expired) forget();
+    }
+  });
   realtime.onConnection.subscribe(() => {
     if (realtime.connection() === 'connected') outbox.wake();
   });
@@ -45,6 +47,15 @@ export function startClient(): void {
     realtime.people.wrote(projectId, thread.subjectKey, message.by.id);
     void outbox.acknowledge(message.clientKey);
   });
+}
+
+let started = false;
+
+/** Once, when the page opens. */
+export function startClient(): void {
+  if (started) return;
+  started = true;
+  joinParts({ access, realtime, liveProjects, outbox, queryClient });
   if (typeof window !== 'undefined' && typeof window.addEventListener === 'function') {
     window.addEventListener('online', () => {
       session.retryNow();

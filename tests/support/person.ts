@@ -14,7 +14,9 @@ import {
   type Upload,
 } from '@/shared/contracts';
 import type { Role } from '@/shared/permissions';
-import type { TestServer } from './server';
+
+/** Where it is asked: a server in this process or one of its own. */
+type AskedServer = { readonly origin: string };
 
 export interface Answer<T> {
   status: number;
@@ -84,7 +86,7 @@ export async function mustAsk<E extends Endpoint>(
 
 export class TestPerson {
   constructor(
-    readonly server: TestServer,
+    readonly server: AskedServer,
     readonly id: string,
     readonly email: string,
     readonly token: string,
@@ -135,7 +137,7 @@ export class TestPerson {
 
 let count = 0;
 
-export async function signUp(server: TestServer, name = `Person ${(count += 1)}`): Promise<TestPerson> {
+export async function signUp(server: AskedServer, name = `Person ${(count += 1)}`): Promise<TestPerson> {
   const email = `${randomUUID()}@lab.example`;
   const body = { email, name, password: 'a long enough password' };
   const { person, accessToken } = await mustAsk(server.origin, null, auth.signUp, { body });
