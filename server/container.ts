@@ -34,13 +34,13 @@ export async function createContainer(env: Env, log: Logger) {
   await source.initialize();
   const unitOfWork = new UnitOfWork(source);
   const allowedOrigins = env.ALLOWED_ORIGINS.split(',').filter(Boolean);
-  const authenticate = new Authenticate(env.TOKEN_SECRET);
+  const sessions = new auth.SessionService(unitOfWork);
+  const authenticate = new Authenticate(env.TOKEN_SECRET, sessions.isOpen.bind(sessions));
   const api = Router({ caseSensitive: true });
   const routes = new Routes(api, authenticate);
   const files = new FileStore(env.DATA_DIR);
 
   const people = new auth.PeopleDirectory(unitOfWork);
-  const sessions = new auth.SessionService(unitOfWork);
   const authService = new auth.AuthService(unitOfWork);
   const teamDirectory = new teams.TeamDirectory(unitOfWork);
   const teamService = new teams.TeamService(unitOfWork);
@@ -158,7 +158,10 @@ export async function createContainer(env: Env, log: Logger) {
     sessions,
     limit: new auth.SignInLimit(env.SIGN_IN_ATTEMPTS),
     allowedOrigins,
-    onClosed: (familyId) => live.cutSession(familyId),
+    onClosed: (familyId) => {
+      authenticate.forget(familyId);
+      live.cutSession(familyId);
+    },
   });
   teams.addTeamRoutes(routes, teamService);
   projects.addProjectRoutes(routes, access, projectService, projectQueries, teamDirectory);

@@ -13,9 +13,19 @@ export interface AccessClaims {
   expiresAt: Date;
 }
 
-/** Short-lived access tokens: signed, with audience and type, checked to the second. */
+/** A sign-in that ended is noticed within this time, in whichever process it ended. */
+const trustedMilliseconds = 1000;
+const sessionsRemembered = 10_000;
+
+/** Short-lived access tokens: signed, with audience and type, checked to the second, good while the sign-in lasts. */
 export class Authenticate {
-  constructor(private readonly secret: string) {}
+  private readonly openUntil = new Map<string, number>();
+
+  constructor(
+    private readonly secret: string,
+    /** Whether the family of renewing tokens an access token came from still lasts. */
+    private readonly lasts: (sessionFamilyId: string) => Promise<boolean>,
+  ) {}
 
   issue(personId: string, sessionFamilyId: string, now = new Date()): { token: string; expiresAt: Date } {
     const issued = Math.floor(now.getTime() / 1000);
@@ -43,10 +53,15 @@ export class Authenticate {
     }
   }
 
-  readonly required: RequestHandler = (request, response, next) => {
+  /** The sign-in ended here: its access tokens end with it. */
+  forget(sessionFamilyId: string): void {
+    this.openUntil.delete(sessionFamilyId);
+  }
+
+  readonly required: RequestHandler = async (request, response, next) => {
     const found = /^Bearer ([\w.-]{1,2000})$/.exec(request.get('authorization') ?? '');
     const claims = found?.[1] ? this.verify(found[1]) : null;
-    if (!claims)
+    if (!claims || !(await this.isOpen(claims.sessionFamilyId)))
       throw new Refusal(
         401,
         'sign-in-needed',
@@ -56,4 +71,13 @@ export class Authenticate {
     response.locals.personId = claims.personId;
     next();
   };
+
+  private async isOpen(sessionFamilyId: string): Promise<boolean> {
+    const now = Date.now();
+    if ((this.openUntil.get(sessionFamilyId) ?? 0) > now) return true;
+    if (!(await this.lasts(sessionFamilyId))) return false;
+    if (this.openUntil.size >= sessionsRemembered) this.openUntil.clear();
+    this.openUntil.set(sessionFamilyId, now + trustedMilliseconds);
+    return true;
+  }
 }

@@ -75,7 +75,8 @@ export function addAuthRoutes(routes: Routes, parts: Parts): void {
     ownPage(request);
     const token = tokenOf(request);
     const renewal = token ? await sessions.renew(token) : null;
-    if (!renewal || 'refused' in renewal) {
+    if (renewal && 'endedFamilyId' in renewal) parts.onClosed(renewal.endedFamilyId);
+    if (!renewal || !('session' in renewal)) {
       throw new Refusal(401, 'sign-in-needed', 'Sign in', 'Sign in again: this sign-in has ended.');
     }
     return reply(request, response, await service.read(renewal.session.personId), renewal.session);

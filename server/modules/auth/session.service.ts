@@ -18,7 +18,11 @@ export interface OpenSession {
   expiresAt: Date;
 }
 
-export type Renewal = { session: OpenSession } | { refused: 'unknown' | 'reused' };
+export type Renewal =
+  | { session: OpenSession }
+  | { refused: 'unknown' }
+  /** A used token came back: everything that came from the same sign-in ended. */
+  | { refused: 'reused'; endedFamilyId: string };
 
 /** Renewing tokens: each use makes a successor; a used one that comes back after the grace ends the whole family. */
 export class SessionService {
@@ -44,7 +48,7 @@ export class SessionService {
         if (at.getTime() - row.replacedAt.getTime() > graceMilliseconds) {
           await manager.update(Session, { familyId: row.familyId, revokedAt: IsNull() }, { revokedAt: at });
           await unit.audit({ action: 'session.reused', subjectKind: 'person', subjectId: row.personId });
-          return { refused: 'reused' };
+          return { refused: 'reused', endedFamilyId: row.familyId };
         }
         // The loser of a race gets a sibling of the successor: both tabs go on, neither clears the other's cookie.
         return { session: await this.insert(manager, row.personId, row.familyId, at) };
