@@ -8,6 +8,7 @@
  *   ChainScale   part length current? labelAt? spans? pins? caption   (indices zero-based)
  *   ShareBars    shares[{ letter, rowCount, share }] own? label
  *   SequenceLine letters[{ code, number, href?, current? }] label tints?
+ *   SequenceGrid letters[{ code, number, href }] label        (rows of ten with a ruler; arrows walk)
  *   ChemistryCue chemistry                                   IndexMark lineHeightPixels? tone?
  *   spokenResidue, shortLabel, wordsForCode                  words without a picture
  */
@@ -20,6 +21,7 @@ export { Evidence, Grade } from './evidence';
 export { ChainScale, type ChainScaleProps, type ScaleSpan } from './chain-scale';
 export { ShareBars, shareWords, type LetterShare, type ShareBarsProps } from './share-bars';
 export { SequenceLine, type SequenceLetter, type SequenceLineProps } from './sequence-line';
+export { SequenceGrid, type SequenceGridProps } from './sequence-grid';
 export { ChemistryCue } from './chemistry-cue';
 export { IndexMark } from './index-mark';
 export {

@@ -12,6 +12,8 @@ export interface LinkProps {
   /** Take the place of the present address in the history. */
   replace?: boolean;
   id?: string;
+  /** -1 where arrows reach it instead: one stop for a whole field of links. */
+  tabIndex?: 0 | -1;
 }
 
 type AnchorProps = AnchorHTMLAttributes<HTMLAnchorElement> & { onPress?: unknown };
@@ -25,8 +27,8 @@ const isOutside = (href: string): boolean => /^([a-z][a-z0-9+.-]*:|\/\/)/i.test(
 const isDownload = (href: string): boolean => href.startsWith('/api/');
 
 /** An anchor: inside the product it navigates without loading the page again, outside it is a plain link. */
-export function Link({ href, children, label, className, style, current, replace, id }: LinkProps) {
-  const shared = { id, className, style, 'aria-label': label, 'aria-current': current };
+export function Link({ href, children, label, className, style, current, replace, id, tabIndex }: LinkProps) {
+  const shared = { id, className, style, tabIndex, 'aria-label': label, 'aria-current': current };
   if (isOutside(href)) {
     return (
       <a href={href} rel="noopener noreferrer" target="_blank" {...shared}>
