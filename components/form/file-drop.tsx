@@ -1,7 +1,7 @@
 import { useId, useRef, useState, type ReactNode } from 'react';
 import FileUp from 'lucide-react-native/icons/file-up';
 import { color, face } from '@/components/theme';
-import { Button } from '@/components/ui';
+import { Button, type ButtonKind } from '@/components/ui';
 
 export interface FileDropProps {
   /** "Upload an alignment of one family". */
@@ -16,13 +16,26 @@ export interface FileDropProps {
   error?: string;
   busyText?: string;
   offReason?: string;
+  /** Plain where the page's one primary button is another. */
+  buttonKind?: ButtonKind;
   /** Beside the button, for example the sample. */
   more?: ReactNode;
 }
 
 /** A file chosen or dropped, one at a time. */
 export function FileDrop(props: FileDropProps) {
-  const { title, hint, action = 'Choose a file', accept, onFile, error, busyText, offReason, more } = props;
+  const {
+    title,
+    hint,
+    action = 'Choose a file',
+    accept,
+    onFile,
+    error,
+    busyText,
+    offReason,
+    more,
+    buttonKind = 'primary',
+  } = props;
   const id = useId();
   const input = useRef<HTMLInputElement>(null);
   const [over, setOver] = useState(false);
@@ -79,7 +92,7 @@ export function FileDrop(props: FileDropProps) {
       />
       <div style={{ display: 'flex', flexWrap: 'wrap', gap: 8, alignItems: 'center' }}>
         <Button
-          kind="primary"
+          kind={buttonKind}
           icon={FileUp}
           busyText={busyText}
           offReason={offReason}

@@ -7,7 +7,7 @@
  *   TextArea    rows? placeholder? maxLength? mono? required? readOnly? onKeyDown?
  *   Select      options[{ value, label, off? }] placeholder? required?
  *   Checkbox    label hint? value: boolean onChange(value)
- *   FileDrop    title hint? action? accept? onFile(file) error? busyText? offReason? more?
+ *   FileDrop    title hint? action? accept? onFile(file) error? busyText? offReason? buttonKind? more?
  *   Field       children(ids): for a control of one's own; spread the ids on it
  */
 export { Field, type ControlIds, type FieldProps, type FieldWords } from './field';

@@ -1,0 +1,91 @@
+import { useState } from 'react';
+import MessageSquare from 'lucide-react-native/icons/message-square';
+import { useLayout } from '@/components/theme';
+import { Button, Caption, Link, Stack, Text, Time } from '@/components/ui';
+import { constructPath, threadPath } from '@/client/paths';
+import { useMay } from '@/features/projects';
+import type { Construct, Design, Mutant } from '@/shared/contracts/plans';
+import type { useMutantActs } from '../use-mutant-acts';
+import { Alternatives } from './alternatives';
+import { Caution } from './caution';
+import { DesignForm } from './design-form';
+import { MutantActions } from './mutant-actions';
+import { Refusal } from './refusal';
+import { StaleNotice } from './stale-notice';
+
+interface AlternativesPaneProps {
+  projectId: string;
+  mutant: Mutant;
+  design: Design | undefined;
+  constructs: readonly Construct[];
+  acts: ReturnType<typeof useMutantActs>;
+  onShow: (design: Design) => void;
+}
+
+/** Which designs there are, why the mutant is wanted, and the next step, with the caution before it. */
+export function AlternativesPane(props: AlternativesPaneProps) {
+  const { projectId, mutant, design, constructs, acts, onShow } = props;
+  const { hasRail } = useLayout();
+  const may = useMay(projectId);
+  const [asked, setAsked] = useState(false);
+  const hasDesigns = mutant.designs.length > 0;
+  const isStale = acts.problem?.status === 412;
+  return (
+    <Stack gap={16}>
+      {hasDesigns ? <Alternatives designs={mutant.designs} shownId={design?.id} onShow={onShow} /> : null}
+      <Purpose projectId={projectId} mutant={mutant} />
+      <Caution />
+      {acts.last && isStale ? (
+        <StaleNotice
+          problem={acts.problem}
+          seen={acts.last.seen}
+          onAgain={acts.last.repeat}
+          onLeave={acts.leave}
+        />
+      ) : (
+        <Refusal outcome={acts.refusedWhat} problem={acts.problem} />
+      )}
+      {hasRail ? (
+        <MutantActions
+          projectId={projectId}
+          design={design}
+          isChoosing={acts.isChoosing}
+          onChoose={acts.choose}
+        />
+      ) : null}
+      {may('plan') && hasDesigns && !asked ? (
+        <Button onPress={() => setAsked(true)}>Design for another construct or host</Button>
+      ) : null}
+      {may('plan') && (!hasDesigns || asked) ? (
+        <DesignForm
+          projectId={projectId}
+          mutant={mutant}
+          constructs={constructs}
+          busy={acts.isDesigning}
+          onDesign={acts.design}
+        />
+      ) : null}
+    </Stack>
+  );
+}
+
+function Purpose({ projectId, mutant }: { projectId: string; mutant: Mutant }) {
+  return (
+    <Stack gap={8}>
+      <Caption>What it is for</Caption>
+      <Text>{mutant.reason || 'No reason was written.'}</Text>
+      <Text kind="meta" tone="soft">
+        {`${mutant.state}, by ${mutant.by.name}, `}
+        <Time iso={mutant.at} />
+      </Text>
+      {mutant.constructId ? (
+        <Link href={constructPath(projectId, mutant.constructId)}>
+          {`Construct ${mutant.constructName ?? ''}`}
+        </Link>
+      ) : null}
+      <Button icon={MessageSquare} href={threadPath(projectId, { kind: 'mutant', id: mutant.id })}>
+        Discuss this mutant
+      </Button>
+    </Stack>
+  );
+}

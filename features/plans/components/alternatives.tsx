@@ -1,0 +1,43 @@
+import { Caption, List, ListRow, Mark, Stack } from '@/components/ui';
+import type { Design } from '@/shared/contracts/plans';
+import { checkLines, worstOf } from '../check-words';
+
+interface AlternativesProps {
+  designs: readonly Design[];
+  shownId: string | undefined;
+  onShow: (design: Design) => void;
+}
+
+export const codonsOf = (design: Design): string => design.codons.map(({ codonTo }) => codonTo).join(', ');
+
+function DesignMark({ design }: { design: Design }) {
+  if (!design.proved) return <Mark tone="danger">not proved</Mark>;
+  if (design.chosen) return <Mark tone="good">chosen</Mark>;
+  const worst = worstOf(checkLines(design.checks));
+  if (worst === 'failed') return <Mark tone="danger">failed</Mark>;
+  return worst === 'look' ? <Mark tone="warn">look</Mark> : <Mark tone="good">passes</Mark>;
+}
+
+/** Designs, best first, each with what speaks for and against it. Pressing one shows it. */
+export function Alternatives({ designs, shownId, onShow }: AlternativesProps) {
+  return (
+    <Stack gap={4}>
+      <Caption count={`${designs.length}, ranked`}>Alternatives</Caption>
+      <List label="Designs, best first" rows={designs} keyOf={({ id }) => id}>
+        {(design) => (
+          <ListRow
+            title={`${design.rank}. complementary pair, ${codonsOf(design)}`}
+            detail={design.reasons.map((reason) => (
+              <span key={reason} style={{ display: 'block' }}>
+                {reason}
+              </span>
+            ))}
+            end={<DesignMark design={design} />}
+            selected={design.id === shownId}
+            onPress={() => onShow(design)}
+          />
+        )}
+      </List>
+    </Stack>
+  );
+}
