@@ -17,6 +17,8 @@ export type OnWorkerProgress = (progress: WorkerProgress) => void;
 /** Threads that read files and lay chains on proteins, each with a limit of memory. */
 export class WorkerPool {
   private readonly pool: Piscina;
+  /** Tasks under way: a thread that dies before it takes its first task would leave them waiting for ever. */
+  private readonly underWay = new Set<AbortController>();
 
   constructor(memoryMegabytes: number, threads = 2) {
     this.pool = new Piscina({
@@ -26,8 +28,13 @@ export class WorkerPool {
       idleTimeout: 30_000,
       // The entry registers the TypeScript loader by itself; a second registration here is refused by Node 20.
       execArgv: [],
-      resourceLimits: { maxOldGenerationSizeMb: memoryMegabytes },
+      // A small young generation: what it hands over at once stays within the leeway in which a thread ends by itself
+      // instead of taking the process along.
+      resourceLimits: { maxOldGenerationSizeMb: memoryMegabytes, maxYoungGenerationSizeMb: 8 },
       recordTiming: false,
+    });
+    this.pool.on('error', (error: unknown) => {
+      for (const task of this.underWay) task.abort(error instanceof Error ? error : new WorkerGone(false));
     });
   }
 
@@ -60,22 +67,24 @@ export class WorkerPool {
   ): Promise<Reply> {
     const { port1, port2 } = new MessageChannel();
     port1.on('message', onProgress);
+    const failed = new AbortController();
+    const either = signal ? AbortSignal.any([signal, failed.signal]) : failed.signal;
+    this.underWay.add(failed);
     try {
-      return (await this.pool.run(
-        { ...input, port: port2 },
-        { name, transferList: [port2], ...(signal && { signal }) },
-      )) as Reply;
+      const task = { ...input, port: port2 };
+      return (await this.pool.run(task, { name, transferList: [port2], signal: either })) as Reply;
     } catch (error) {
-      throw translated(error, signal);
+      throw translated(error, either);
     } finally {
+      this.underWay.delete(failed);
       port1.close();
     }
   }
 }
 
 /** Our own tasks never throw on bad input, so an error is the end of a thread, or a fault of ours. */
-function translated(error: unknown, signal: AbortSignal | undefined): unknown {
-  if (signal?.aborted) return signal.reason instanceof Error ? signal.reason : error;
+function translated(error: unknown, signal: AbortSignal): unknown {
+  if (signal.aborted) return signal.reason instanceof Error ? signal.reason : error;
   const { code, message = '' } = (error ?? {}) as { code?: string; message?: string };
   if (code === 'ERR_WORKER_OUT_OF_MEMORY') return new WorkerGone(true);
   // Texts and arrays outside the heap are refused by the engine with these words.

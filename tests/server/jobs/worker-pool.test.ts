@@ -20,8 +20,10 @@ describe('worker threads', () => {
     try {
       const told: string[] = [];
       const signal = new AbortController().signal;
-      const alignment = await pool.readAlignment(fixture('alignments/c_small_mafft.afa'), signal, ({ stage }) =>
-        told.push(stage),
+      const alignment = await pool.readAlignment(
+        fixture('alignments/c_small_mafft.afa'),
+        signal,
+        ({ stage }) => told.push(stage),
       );
       expect(alignment.value?.rows).toHaveLength(5);
       const candidates = (alignment.value?.rows ?? []).map((row) => ({
@@ -30,8 +32,11 @@ describe('worker threads', () => {
         family: 'c',
         residues: row.residues,
       }));
-      const structure = await pool.readStructure(fixture('structures/4bem.pdb'), candidates, signal, ({ stage }) =>
-        told.push(stage),
+      const structure = await pool.readStructure(
+        fixture('structures/4bem.pdb'),
+        candidates,
+        signal,
+        ({ stage }) => told.push(stage),
       );
       expect(structure.value?.chains.length).toBeGreaterThan(9);
       expect(told).toContain('map');
@@ -43,8 +48,8 @@ describe('worker threads', () => {
   it('run out of memory without taking the server along', async () => {
     const file = path.join(folder, 'large.afa');
     const row = (at: number) => `>row${at}\n${'ACDEFGHIKLMNPQRSTVWY'.repeat(100)}\n`;
-    await writeFile(file, Array.from({ length: 20_000 }, (_, at) => row(at)).join(''));
-    const pool = new WorkerPool(24, 1);
+    await writeFile(file, Array.from({ length: 25_000 }, (_, at) => row(at)).join(''));
+    const pool = new WorkerPool(64, 1);
     try {
       const signal = new AbortController().signal;
       await expect(pool.readAlignment(file, signal, () => {})).rejects.toMatchObject({ tooMuchMemory: true });
