@@ -39,7 +39,14 @@ function RulerCell({ number }: { number: string | null }) {
   return (
     <span style={ruler} aria-hidden>
       <span
-        style={{ position: 'absolute', left: '50%', bottom: 0, width: 1, height, background: color.lineControl }}
+        style={{
+          position: 'absolute',
+          left: '50%',
+          bottom: 0,
+          width: 1,
+          height,
+          background: color.lineControl,
+        }}
       />
       {written ? (
         <span
@@ -87,7 +94,9 @@ function LetterCell({ letter, heightPixels, isStop }: LetterCellProps) {
       }}
     >
       <span aria-hidden>{letter.code}</span>
-      <span className="sr-only">{letter.number === null ? `${name}, no label` : `${name} ${letter.number}`}</span>
+      <span className="sr-only">
+        {letter.number === null ? `${name}, no label` : `${name} ${letter.number}`}
+      </span>
       {chemistry ? <ChemistryCue chemistry={chemistry} /> : null}
     </Link>
   );
@@ -118,7 +127,8 @@ export function SequenceGrid({ letters, label }: SequenceGridProps) {
       aria-label={label}
       onKeyDown={walk}
       onFocus={(event) => {
-        const place = linksOf(event.currentTarget).findIndex((link) => link === event.target);
+        const { target } = event;
+        const place = target instanceof HTMLAnchorElement ? linksOf(event.currentTarget).indexOf(target) : -1;
         if (place >= 0) setStop(place);
       }}
       style={{
@@ -128,7 +138,10 @@ export function SequenceGrid({ letters, label }: SequenceGridProps) {
       }}
     >
       {rows.map((start) => (
-        <div key={start} style={{ display: 'grid', gridTemplateColumns: `repeat(${rowLength}, minmax(0,1fr))` }}>
+        <div
+          key={start}
+          style={{ display: 'grid', gridTemplateColumns: `repeat(${rowLength}, minmax(0,1fr))` }}
+        >
           {letters.slice(start, start + rowLength).map((letter, step) => (
             <RulerCell key={`ruler ${start + step}`} number={letter.number} />
           ))}

@@ -8,3 +8,4 @@ export {
   useSetOffsetNumbering,
 } from './use-families';
 export { familyOptions } from './family-options';
+export { ProteinScreen } from './screens/protein-screen';

@@ -1,6 +1,7 @@
 import type { Numbering, Protein } from '@/shared/contracts/families';
 import {
   labelOfResidue,
+  labelsOf,
   offsetNumbering,
   residueOfLabel,
   type Numbering as CoreNumbering,
@@ -73,4 +74,14 @@ export function labelRange(numbering: Numbering, length: number): { first: strin
   const core = coreNumbering(numbering);
   const at = (index: number) => labelOfResidue(core, residueIndex(index)) ?? 'no label';
   return { first: at(0), last: at(length - 1) };
+}
+
+/** The residue a label means in a numbering, or null. */
+export const placeOfLabel = (numbering: Numbering, label: string): number | null =>
+  residueOfLabel(coreNumbering(numbering), label);
+
+/** Every letter of a protein with its label in a numbering. */
+export function labelledLetters(protein: Protein, numbering: Numbering | undefined) {
+  const labels = labelsOf(numbering ? coreNumbering(numbering) : { segments: [] }, protein.residues.length);
+  return [...protein.residues].map((code, index) => ({ code, number: labels[index] ?? null, index }));
 }
