@@ -8,6 +8,14 @@ export function keepNewer<Value extends Versioned>(old: Value | undefined, next:
 }
 
 /**
+ * The later one unless its version is lower. For what carries counts of other things, which change without a version
+ * of its own: the last event has the last count.
+ */
+export function keepNotOlder<Value extends Versioned>(old: Value, next: Value): Value {
+  return old.version > next.version ? old : next;
+}
+
+/**
  * Puts a whole object into a list by its id, keeping the higher version, and keeps the list's order. The list itself
  * when nothing changed.
  */
@@ -15,8 +23,9 @@ export function putNewer<Value extends Versioned & { id: string }>(
   list: Value[],
   next: Value,
   inOrder: (one: Value, other: Value) => number,
+  keep: (old: Value, next: Value) => Value = keepNewer,
 ): Value[] {
-  return putBy(list, next, (item) => item.id === next.id, inOrder, keepNewer);
+  return putBy(list, next, (item) => item.id === next.id, inOrder, keep);
 }
 
 /** The same for things known by something other than an id and a version. */
@@ -37,3 +46,6 @@ export function putBy<Value>(
 
 /** Text order by code, as ids made later sort later. */
 export const byText = (one: string, other: string): number => (one < other ? -1 : one > other ? 1 : 0);
+
+/** For lists with the newest first. */
+export const newestFirst = (one: { id: string }, other: { id: string }): number => byText(other.id, one.id);

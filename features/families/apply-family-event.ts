@@ -1,10 +1,11 @@
 import type { Family, Protein, ProteinBrief } from '@/shared/contracts/families';
 import { outOfDate, type Applied, type Fact } from '@/client/facts';
-import { byText, keepNewer, putNewer } from '@/client/keep-newer';
+import { byText, keepNewer, keepNotOlder, putNewer } from '@/client/keep-newer';
 
 export function applyToFamilies(list: Family[], fact: Fact): Applied<Family[]> {
   if (fact.kind === 'family.changed') {
-    return putNewer(list, fact.payload, (one, other) => one.sort - other.sort || byText(one.id, other.id));
+    const inOrder = (one: Family, other: Family) => one.sort - other.sort || byText(one.id, other.id);
+    return putNewer(list, fact.payload, inOrder, keepNotOlder);
   }
   // These can bring new proteins, which a family counts.
   const brings =

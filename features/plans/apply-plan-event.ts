@@ -1,9 +1,7 @@
 import type { Construct, Mutant } from '@/shared/contracts/plans';
 import { outOfDate, type Applied, type Fact } from '@/client/facts';
-import { byText, keepNewer, putNewer } from '@/client/keep-newer';
+import { keepNewer, newestFirst, putNewer } from '@/client/keep-newer';
 import { relabels } from '@/client/relabels';
-
-const newestFirst = (one: { id: string }, other: { id: string }) => byText(other.id, one.id);
 
 export interface MutantFilter {
   proteinId?: string;

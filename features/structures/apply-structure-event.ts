@@ -1,18 +1,12 @@
 import type { ChainMap } from '@/shared/contracts/maps';
 import type { Structure, StructureWithChains } from '@/shared/contracts/structures';
 import { outOfDate, type Applied, type Fact } from '@/client/facts';
-import { keepNewer } from '@/client/keep-newer';
+import { keepNewer, keepNotOlder, newestFirst, putNewer } from '@/client/keep-newer';
 
-/** A known structure is replaced in its place; where a new one stands, and how many chains wait, the server knows. */
-export function applyToStructures(list: Structure[], fact: Fact): Applied<Structure[]> {
-  if (fact.kind === 'map.decided') {
-    return list.some(({ id }) => id === fact.payload.structureId) ? outOfDate : list;
-  }
+/** Newest first. How many of its chains wait changes with each decision, without a version of its own. */
+export function applyToStructures(list: Structure[], fact: Fact): Structure[] {
   if (fact.kind !== 'structure.changed') return list;
-  const old = list.find(({ id }) => id === fact.payload.id);
-  if (!old) return outOfDate;
-  const kept = keepNewer(old, fact.payload);
-  return kept === old ? list : list.map((one) => (one === old ? kept : one));
+  return putNewer(list, fact.payload, newestFirst, keepNotOlder);
 }
 
 /** Chains belong to a revision; what a curator said of one is its map. */
@@ -21,7 +15,7 @@ export function applyToStructure(structure: StructureWithChains, fact: Fact): Ap
     return withMap(structure, fact.payload);
   }
   if (fact.kind === 'structure.changed' && fact.payload.id === structure.id) {
-    if (fact.payload.version <= structure.version) return structure;
+    if (fact.payload.version < structure.version) return structure;
     return fact.payload.revisionId === structure.revisionId ? { ...structure, ...fact.payload } : outOfDate;
   }
   return namesProtein(structure.chains, fact) ? outOfDate : structure;

@@ -1,11 +1,11 @@
 import type { Upload } from '@/shared/contracts/uploads';
 import type { Fact } from '@/client/facts';
-import { byText, keepNewer, putNewer } from '@/client/keep-newer';
+import { keepNewer, newestFirst, putNewer } from '@/client/keep-newer';
 
 /** Newest first. */
 export function applyToUploads(list: Upload[], fact: Fact): Upload[] {
   if (fact.kind !== 'upload.changed') return list;
-  return putNewer(list, fact.payload, (one, other) => byText(other.id, one.id));
+  return putNewer(list, fact.payload, newestFirst);
 }
 
 export function applyToUpload(upload: Upload, fact: Fact): Upload {

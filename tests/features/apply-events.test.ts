@@ -149,10 +149,17 @@ describe('alignments', () => {
     expect(applyToAlignment(held, fact('alignment.changed', alignment()))).toBe(held);
   });
 
-  test('one that became the reference took that from another: the list is read again', () => {
-    const list = [alignment({ isReference: false })];
-    expect(applyToAlignments(list, fact('alignment.changed', alignment({ version: 2 })))).toBe(outOfDate);
-    expect(applyToAlignments(list, fact('alignment.changed', alignment({ id: idOf(29) })))).toBe(outOfDate);
+  test('which one is the reference is the family’s to say', () => {
+    const list = [alignment(), alignment({ id: idOf(19), isReference: false })];
+    const chosen = (id: string) => fact('family.changed', family({ referenceAlignmentId: id, version: 2 }));
+    expect(applyToAlignments(list, chosen(idOf(19)))).toBe(outOfDate);
+    expect(applyToAlignments(list, chosen(idOf(20)))).toBe(list);
+    expect(applyToAlignment({ ...alignment(), rows }, chosen(idOf(19)))).toBe(outOfDate);
+  });
+
+  test('the newest stands first', () => {
+    const newer = fact('alignment.changed', alignment({ id: idOf(29), isReference: false }));
+    expect(applyToAlignments([alignment()], newer)).toMatchObject([{ id: idOf(29) }, { id: idOf(20) }]);
   });
 });
 
@@ -164,8 +171,14 @@ describe('structures and maps', () => {
     const after = applyToStructure(held, fact('map.decided', decided));
     expect(after).toEqual({ ...held, chains: [decided, held.chains[1]], waiting: 1 });
     expect(applyToStructure(after as typeof held, fact('map.decided', decided))).toBe(after);
-    expect(applyToStructures([structure()], fact('map.decided', decided))).toBe(outOfDate);
     expect(applyToMap(chainMap(), fact('map.decided', decided))).toEqual(decided);
+  });
+
+  test('how many chains wait is told without a new version, and the last word counts', () => {
+    const fewer = structure({ waiting: 0 });
+    expect(applyToStructures([structure()], fact('structure.changed', fewer))).toEqual([fewer]);
+    const newer = [structure({ version: 2, waiting: 0 })];
+    expect(applyToStructures(newer, fact('structure.changed', structure()))).toBe(newer);
   });
 
   test('a renamed protein has the chains that name it read again, a new one does not', () => {
