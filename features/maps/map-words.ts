@@ -1,9 +1,9 @@
 import type { ChainMap } from '@/shared/contracts/maps';
 
-/** `98.7 %`; what is not whole never reads as 100. */
+/** `98.7 %`, kept on one line; what is not whole never reads as 100. */
 export function percentWords(fraction: number): string {
   const rounded = Math.round(fraction * 1000) / 10;
-  return `${fraction < 1 ? Math.min(99.9, rounded) : rounded} %`;
+  return `${fraction < 1 ? Math.min(99.9, rounded) : rounded}\u00a0%`;
 }
 
 export const countWords = (count: number, one: string, many = `${one}s`): string =>
@@ -28,8 +28,8 @@ export function authorShift({
 
 /** The same in words. */
 export function shiftWords(shift: number): string {
-  if (shift === 0) return 'equal the place in the sequence, at both ends';
-  return `place in the sequence ${shift > 0 ? 'plus' : 'minus'} ${Math.abs(shift)}, at both ends`;
+  if (shift === 0) return 'equals the place in the sequence';
+  return `place in the sequence ${shift > 0 ? 'plus' : 'minus'} ${Math.abs(shift)}`;
 }
 
 /** The stretch of the protein a chain lies on, places from 1, with its gaps: `2 to 79 of 81, 1 gap`. */

@@ -11,10 +11,12 @@ export function chainSentence({ first, standing }: ChainGroup): string {
   return `${percentWords(first.identity)} identical, ${percentWords(first.coverage)} covered, ${mismatches}; runner-up ${runnerUpWords(first)}.`;
 }
 
-/** `β 24 %`, with the organism where it is of the same family. */
+/** `β 24 %`, with the organism where it is of the same family; said to be the nearest where nothing is proposed. */
 export function runnerUpWords(chain: ChainMap): string {
   const next = runnerUp(chain);
   if (!next) return 'none near';
+  if (chain.proteinId === null)
+    return `nearest ${next.family} ${next.organism} ${percentWords(next.identity)}`;
   const of = next.familyId === chain.familyId ? ` ${next.organism}` : '';
   return `${next.family}${of} ${percentWords(next.identity)}`;
 }

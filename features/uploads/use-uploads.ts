@@ -1,4 +1,4 @@
-import { useQuery } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useMemo, useState } from 'react';
 import type { z } from 'zod';
 import { uploads, type newUploadBody, type Upload } from '@/shared/contracts/uploads';
@@ -65,6 +65,7 @@ export interface MakeUpload {
 
 /** Sends a file; `share` is how much of it left, 0 to 1, or null while nothing is known. */
 export function useMakeUpload(projectId: string) {
+  const client = useQueryClient();
   const [share, setShare] = useState<number | null>(null);
   const [keys] = useState(() => new ActKeys());
   const act = useOwnAct<MakeUpload, Upload>({
@@ -81,7 +82,12 @@ export function useMakeUpload(projectId: string) {
         throw error;
       }
     },
-    take: (payload) => liveProjects.tell(projectId, [{ kind: 'upload.changed', payload }]),
+    take(payload) {
+      // Its page begins with this and asks at once how it went on.
+      const asOf = { updatedAt: 0 };
+      client.setQueryData<Upload>(key(projectId, payload.id), (held) => held ?? payload, asOf);
+      liveProjects.tell(projectId, [{ kind: 'upload.changed', payload }]);
+    },
   });
   return { ...act, share };
 }

@@ -3,9 +3,10 @@ import type { Family } from '@/shared/contracts/families';
 import { PageTitle, Screen } from '@/components/layout';
 import { FamilyTag } from '@/components/residue';
 import { useLayout } from '@/components/theme';
-import { Button, Caption, IssueList, Row, Stack, Text, Time } from '@/components/ui';
-import { familyPath, findPath, newUploadPath } from '@/client/paths';
+import { Button, Caption, IssueList, Link, Row, Stack, Text, Time } from '@/components/ui';
+import { familyPath, findPath, newUploadPath, uploadPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
+import { useUploads } from '@/features/uploads';
 import type { AlignmentWithRows } from '../apply-alignment-event';
 import { AlignmentRows } from './alignment-rows';
 
@@ -15,6 +16,7 @@ interface AlignmentPageProps {
   family: Family | undefined;
 }
 
+const formatWords: Record<string, string> = { fasta: 'aligned FASTA' };
 const warnings = (count: number): string => `${count} ${count === 1 ? 'warning' : 'warnings'}`;
 
 /** An alignment as it was read: what it is, what was doubtful, and its rows. */
@@ -23,6 +25,7 @@ export function AlignmentPage({ projectId, alignment, family }: AlignmentPagePro
   const mayUpload = useMay(projectId)('upload');
   const { name, familyId, revision, isReference, rowCount, columnCount, issues } = alignment;
   const familyName = family?.name ?? '';
+  const source = useUploads(projectId).data?.find(({ alignmentId }) => alignmentId === alignment.id);
   const upload = mayUpload ? (
     <Button icon={FileUp} full={!hasRail} href={newUploadPath(projectId, 'alignment', familyId)}>
       {`Upload another of ${familyName}`}
@@ -41,7 +44,7 @@ export function AlignmentPage({ projectId, alignment, family }: AlignmentPagePro
         },
         { key: 'rows', label: 'Rows', value: rowCount },
         { key: 'columns', label: 'Columns', value: `1 to ${columnCount}` },
-        { key: 'format', label: 'Read as', value: alignment.format },
+        { key: 'format', label: 'Read as', value: formatWords[alignment.format] ?? alignment.format },
       ]}
     >
       <Stack gap={16}>
@@ -61,7 +64,12 @@ export function AlignmentPage({ projectId, alignment, family }: AlignmentPagePro
         </Row>
         {issues.length > 0 ? (
           <Stack gap={4}>
-            <Caption count={warnings(issues.length)}>Found while reading</Caption>
+            <Caption
+              count={warnings(issues.length)}
+              action={source ? <Link href={uploadPath(projectId, source.id)}>In the file</Link> : undefined}
+            >
+              Found while reading
+            </Caption>
             <IssueList
               label="Found while reading"
               issues={issues.map(({ severity, line, column, message }, place) => ({

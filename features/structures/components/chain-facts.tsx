@@ -47,7 +47,7 @@ export function ChainFacts({ projectId, chain }: { projectId: string; chain: Cha
         ) : null}
         {isMapped ? (
           <KeyValueRow
-            name="author numbers"
+            name="author number, at both ends"
             value={shift === null ? 'no one shift from the sequence' : shiftWords(shift)}
           />
         ) : null}

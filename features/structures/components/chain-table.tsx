@@ -20,7 +20,7 @@ export function ChainTable({ groups, families, openKey, onOpen }: ChainsProps) {
           aria-pressed={group.key === openKey}
           onClick={() => onOpen(group)}
           style={{
-            minHeight: 'var(--hit)',
+            minHeight: 'var(--row)',
             minWidth: 44,
             textAlign: 'left',
             font: `400 14px/20px ${face.mono}`,

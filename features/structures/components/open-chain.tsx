@@ -44,7 +44,7 @@ export function OpenChain({ projectId, group, families, deciding, isPrimary, isA
           <StandingMark group={group} />
         </Row>
         <Row gap={12} align="start">
-          {isProtein ? <FamilyOf family={family} /> : null}
+          {family ? <FamilyOf family={family} /> : null}
           <Text style={{ flex: 1 }}>{first.reason}</Text>
         </Row>
         {chains.length > 1 ? (

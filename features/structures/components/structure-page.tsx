@@ -3,9 +3,10 @@ import { useMemo } from 'react';
 import type { Family } from '@/shared/contracts/families';
 import type { StructureWithChains } from '@/shared/contracts/structures';
 import { Panes, Screen, type PaneItem } from '@/components/layout';
-import { findPath } from '@/client/paths';
+import { findPath, uploadPath } from '@/client/paths';
 import { countOf, groupChains, useConfirmReady, useDecideChains } from '@/features/maps';
 import { useMay } from '@/features/projects';
+import { useUploads } from '@/features/uploads';
 import { ConfirmReady } from './confirm-ready';
 import { OpenChain } from './open-chain';
 import { StructureReport } from './structure-report';
@@ -23,6 +24,7 @@ export function StructurePage({ projectId, structure, families }: StructurePageP
   const mayConfirm = useMay(projectId)('confirm map');
   const deciding = useDecideChains(projectId);
   const confirmReady = useConfirmReady(projectId);
+  const upload = useUploads(projectId).data?.find(({ structureId }) => structureId === structure.id);
   const groups = useMemo(() => groupChains(structure.chains), [structure.chains]);
   const byId = useMemo(() => new Map(families.map((family) => [family.id, family])), [families]);
   const open = groups.find(({ chains }) => chains.some(({ authorId }) => authorId === asked)) ?? groups[0];
@@ -49,6 +51,7 @@ export function StructurePage({ projectId, structure, families }: StructurePageP
         onOpen={({ first }) => router.setParams({ chain: first.authorId })}
         mayConfirm={mayConfirm}
         problem={confirmReady.error?.message ?? null}
+        uploadHref={upload && uploadPath(projectId, upload.id)}
         confirm={confirm(false)}
       />
     ),

@@ -2,7 +2,7 @@ import type { ReactNode } from 'react';
 import type { StructureWithChains } from '@/shared/contracts/structures';
 import { PageTitle } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Banner, Caption, IssueList, Row, Stack, StageScale, Text, Time } from '@/components/ui';
+import { Banner, Caption, IssueList, Link, Row, Stack, StageScale, Text, Time } from '@/components/ui';
 import { countOf, countWords, standings } from '@/features/maps';
 import { ChainList, type ChainsProps } from './chain-list';
 import { ChainTable } from './chain-table';
@@ -11,13 +11,15 @@ interface StructureReportProps extends ChainsProps {
   structure: StructureWithChains;
   mayConfirm: boolean;
   problem: string | null;
+  /** The upload it came with, where its warnings stand beside the text of the file. */
+  uploadHref: string | undefined;
   /** The main button, on a wide screen. */
   confirm: ReactNode;
 }
 
 /** A structure, how far its map is confirmed, and its chains in the order in which they need a person. */
 export function StructureReport(props: StructureReportProps) {
-  const { structure, mayConfirm, problem, confirm, groups } = props;
+  const { structure, mayConfirm, problem, uploadHref, confirm, groups } = props;
   const { hasRail } = useLayout();
   const { name, revision, title, fileName, by, at, waiting, chains, issues } = structure;
   const proteinCount = chains.filter(({ status }) => status !== null).length;
@@ -30,13 +32,13 @@ export function StructureReport(props: StructureReportProps) {
     .join(', ');
   return (
     <Stack gap={16}>
-      <div>
+      <Stack gap={4}>
         <PageTitle>{`${name}, revision ${revision}`}</PageTitle>
         {title ? <Text>{title}</Text> : null}
         <Text kind="small" tone="soft">
           {fileName} · uploaded by {by.name}, <Time iso={at} />
         </Text>
-      </div>
+      </Stack>
       <StageScale
         stage={isDone ? 'done' : 'confirm'}
         share={share}
@@ -52,7 +54,12 @@ export function StructureReport(props: StructureReportProps) {
       </Stack>
       {issues.length > 0 ? (
         <Stack gap={4}>
-          <Caption count={countWords(issues.length, 'warning')}>Found while reading</Caption>
+          <Caption
+            count={countWords(issues.length, 'warning')}
+            action={uploadHref ? <Link href={uploadHref}>In the file</Link> : undefined}
+          >
+            Found while reading
+          </Caption>
           <IssueList
             label="Found while reading"
             issues={issues.map(({ severity, line, column, message }, place) => ({

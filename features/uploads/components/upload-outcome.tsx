@@ -17,7 +17,7 @@ export function UploadOutcome({ upload }: { upload: Upload }) {
     <Banner kind="good">
       <b>{`Stored. ${upload.fileName} was read whole.`}</b>{' '}
       {upload.kind === 'alignment'
-        ? 'Each of its rows is a protein of the family now.'
+        ? 'Its rows are proteins of the family now.'
         : 'Each of its protein chains is decided.'}
     </Banner>
   );

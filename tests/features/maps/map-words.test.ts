@@ -17,10 +17,10 @@ describe('chains are named', () => {
 
 describe('a share', () => {
   it.each([
-    [1, '100 %'],
-    [0.9999, '99.9 %'],
-    [0.9868, '98.7 %'],
-    [0, '0 %'],
+    [1, '100\u00a0%'],
+    [0.9999, '99.9\u00a0%'],
+    [0.9868, '98.7\u00a0%'],
+    [0, '0\u00a0%'],
   ])('%f reads %s', (fraction, words) => expect(percentWords(fraction)).toBe(words));
 });
 
@@ -34,13 +34,13 @@ describe('author numbers beside places in the sequence', () => {
 
   it('are equal', () => {
     expect(authorShift(whole(1, '2', '80'))).toBe(0);
-    expect(shiftWords(0)).toBe('equal the place in the sequence, at both ends');
+    expect(shiftWords(0)).toBe('equals the place in the sequence');
   });
 
   it('are shifted, up or down', () => {
     expect(authorShift(whole(43, '1', '79'))).toBe(-43);
-    expect(shiftWords(-43)).toBe('place in the sequence minus 43, at both ends');
-    expect(shiftWords(50)).toBe('place in the sequence plus 50, at both ends');
+    expect(shiftWords(-43)).toBe('place in the sequence minus 43');
+    expect(shiftWords(50)).toBe('place in the sequence plus 50');
   });
 
   it('have no one shift when the ends differ, carry letters, or lie outside the protein', () => {
