@@ -43,7 +43,13 @@ module.exports = {
       testMatch: ['<rootDir>/tests/**/*.test.{ts,tsx}'],
       testPathIgnorePatterns: special,
     },
-    { ...shared, ...onDatabase, displayName: 'api', testMatch: ['<rootDir>/tests/server/**/*.test.ts'] },
+    {
+      ...shared,
+      ...onDatabase,
+      setupFilesAfterEnv: ['<rootDir>/tests/support/patient-timeout.ts'],
+      displayName: 'api',
+      testMatch: ['<rootDir>/tests/server/**/*.test.ts'],
+    },
     {
       ...shared,
       ...onDatabase,

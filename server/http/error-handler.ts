@@ -1,8 +1,8 @@
 import type {} from 'pino-http';
 import type { ErrorRequestHandler, Response } from 'express';
 import type { Problem } from '../../shared/contracts';
-import { isConnectionLost } from '../lib/database-errors';
-import { busy, Refusal } from '../lib/problem';
+import { isConnectionLost, isDuplicate } from '../lib/database-errors';
+import { busy, conflict, notFound, Refusal } from '../lib/problem';
 
 const nothingMore = new Set(['entity.parse.failed', 'encoding.unsupported', 'charset.unsupported']);
 
@@ -10,7 +10,12 @@ const nothingMore = new Set(['entity.parse.failed', 'encoding.unsupported', 'cha
 function refusalOf(error: unknown): Refusal | null {
   if (error instanceof Refusal) return error;
   if (isConnectionLost(error)) return busy('The database does not answer. Try again in a moment.');
+  if (isDuplicate(error)) {
+    return conflict('made-meanwhile', 'Somebody made the same thing a moment ago. Read again, then decide.');
+  }
   const { type, status, code } = (error ?? {}) as { type?: string; status?: number; code?: string };
+  // Files that are gone, paths that lead out of the folder, addresses that cannot be decoded.
+  if (status === 404 || status === 403 || error instanceof URIError) return notFound('address');
   if (type === 'entity.too.large') {
     return new Refusal(
       413,

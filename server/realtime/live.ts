@@ -10,6 +10,7 @@ import {
 import type { AnnouncedEvent } from '../db';
 import { originAllowed, type AccessClaims, type Authenticate } from '../http';
 import type { Logger } from '../lib/log';
+import { notFound } from '../lib/problem';
 import type { PeopleDirectory, SessionService } from '../modules/auth';
 import type { ProjectAccess, ProjectQueries } from '../modules/projects';
 import { Presence } from './presence';
@@ -125,7 +126,8 @@ export class Live {
     });
     socket.on('project:leave', (body) => {
       const parsed = joinBody.safeParse(body);
-      if (parsed.success) this.leave(socket, parsed.data.projectId);
+      if (parsed.success && socket.rooms.has(projectRoom(parsed.data.projectId)))
+        this.leave(socket, parsed.data.projectId);
     });
     socket.on('project:typing', (body) => {
       const parsed = typingBody.safeParse(body);
@@ -141,8 +143,15 @@ export class Live {
   }
 
   private async join(socket: LiveSocket, projectId: string): Promise<{ head: number }> {
-    await this.parts.access.membership(socket.data.person.id, projectId);
+    const personId = socket.data.person.id;
+    await this.parts.access.membership(personId, projectId);
     await socket.join(projectRoom(projectId));
+    // Removed between the question and the joining: whoever puts people out did not find them yet.
+    if (!(await this.parts.access.roleOf(personId, projectId))) {
+      await socket.leave(projectRoom(projectId));
+      throw notFound('project');
+    }
+    if (!socket.connected) return { head: 0 };
     this.presence.add(projectId, socket.id, socket.data.person);
     this.tellPresence(projectId);
     return { head: await this.parts.queries.head(projectId) };

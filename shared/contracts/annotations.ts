@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { Act } from '../permissions';
 import { id, indexFromZero, moment, personBrief, projectParams, residueLabel, version } from './common';
 import { endpoint } from './endpoint';
 import { grade } from './residues';
@@ -27,6 +28,21 @@ export const evidenceKinds = [
 ] as const;
 export const confidences = ['low', 'medium', 'high'] as const;
 export const annotationStatuses = ['proposed', 'accepted', 'contested', 'retired'] as const;
+export type AnnotationStatus = (typeof annotationStatuses)[number];
+/** proposed → accepted or contested → retired; a retired one can be proposed again. Nothing is deleted. */
+export const annotationSteps: Record<AnnotationStatus, readonly AnnotationStatus[]> = {
+  proposed: ['accepted', 'contested', 'retired'],
+  accepted: ['contested', 'retired'],
+  contested: ['accepted', 'retired', 'proposed'],
+  retired: ['proposed'],
+};
+/** The right that each step asks for. */
+export const actOfAnnotationStatus: Record<AnnotationStatus, Act> = {
+  accepted: 'accept annotation',
+  contested: 'contest annotation',
+  retired: 'retire annotation',
+  proposed: 'retire annotation',
+};
 
 export const evidence = z.strictObject({
   kind: z.enum(evidenceKinds),

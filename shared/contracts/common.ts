@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
-export const id = z.uuid();
+/** In lower case, so that one thing has one id wherever ids are compared as text. */
+export const id = z.uuid().toLowerCase();
 export const moment = z.iso.datetime();
 /** A name people give: something visible, at most 120 characters, on one line. */
 export const givenName = z

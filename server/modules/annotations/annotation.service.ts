@@ -1,9 +1,10 @@
 import type { z } from 'zod';
-import type {
-  Annotation as AnnotationContract,
-  annotationStatusBody,
-  editAnnotationBody,
-  newAnnotationBody,
+import {
+  actOfAnnotationStatus,
+  type Annotation as AnnotationContract,
+  type annotationStatusBody,
+  type editAnnotationBody,
+  type newAnnotationBody,
 } from '../../../shared/contracts';
 import type { Unit, UnitOfWork } from '../../db';
 import { newId } from '../../lib/new-id';
@@ -13,8 +14,9 @@ import type { ProjectAccess } from '../projects';
 import type { AnnotationAccess } from './annotation.access';
 import { AnnotationVersion } from './annotation-version.entity';
 import { Annotation } from './annotation.entity';
-import { actOfStatus, checkStatusStep, shapeOf } from './annotation.policy';
+import { checkStatusStep, shapeOf } from './annotation.policy';
 import type { AnnotationQueries } from './annotation.queries';
+import { checkCopies } from './pin.copies';
 import { Pin } from './pin.entity';
 
 type Content = z.infer<typeof editAnnotationBody>;
@@ -35,6 +37,7 @@ export class AnnotationService {
   ): Promise<AnnotationContract> {
     await this.projects.may(personId, projectId, 'annotate');
     await this.proteins.mustHoldResidues(projectId, body.pins);
+    await checkCopies(this.unitOfWork, projectId, body.pins);
     const places = body.pins.map((pin) => `${pin.proteinId}:${pin.residueIndex}`);
     if (new Set(places).size < places.length) {
       throw unusable('pinned-twice', 'The same residue is named twice. Name each residue once.');
@@ -59,7 +62,7 @@ export class AnnotationService {
           proteinId: pin.proteinId,
           residueIndex: pin.residueIndex,
           structureId: pin.structureId ?? null,
-          chains: pin.chains ?? null,
+          chains: pin.chains?.length ? pin.chains : null,
         })),
       );
       await this.addVersion(unit, annotation.id, 1, body);
@@ -98,7 +101,9 @@ export class AnnotationService {
     { status, reason }: z.infer<typeof annotationStatusBody>,
   ) {
     const { annotation: seen } = await this.access.seen(personId, projectId, annotationId);
-    await this.projects.may(personId, projectId, actOfStatus[status], { own: seen.createdBy === personId });
+    await this.projects.may(personId, projectId, actOfAnnotationStatus[status], {
+      own: seen.createdBy === personId,
+    });
     return this.unitOfWork.write({ projectId }, async (unit) => {
       const annotation = await this.current(unit, annotationId, version);
       checkStatusStep(annotation.status, status, reason);

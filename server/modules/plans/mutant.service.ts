@@ -141,9 +141,7 @@ export class MutantService {
           ),
         );
       }
-      await unit.manager.save(
-        Object.assign(mutant, { constructId: body.constructId, state: 'designed' as const }),
-      );
+      await this.saveNext(unit, Object.assign(mutant, { constructId: body.constructId, state: 'designed' }));
       return this.finish(unit, mutant, 'mutant.designed', null, { host: body.host, designs: designs.length });
     });
   }
@@ -159,9 +157,7 @@ export class MutantService {
       const before = await unit.manager.findOneBy(Design, { mutantId, chosen: true });
       await unit.manager.update(Design, { mutantId }, { chosen: false });
       await unit.manager.update(Design, { id: designId }, { chosen: true });
-      // The version counts every change people see, and the chosen design is one of them.
-      mutant.version += 1;
-      await unit.manager.save(mutant);
+      await this.saveNext(unit, mutant);
       return this.finish(
         unit,
         mutant,
@@ -199,6 +195,12 @@ export class MutantService {
     if (mutant.version !== version)
       throw stale((await this.queries.presentMutants([mutant], unit.manager))[0]);
     return mutant;
+  }
+
+  /** The version counts every change people see: designs, and the chosen one, are part of their mutant. */
+  private async saveNext(unit: Unit, mutant: Mutant): Promise<void> {
+    mutant.version += 1;
+    await unit.manager.save(mutant);
   }
 
   private async finish(unit: Unit, mutant: Mutant, action: string, before: unknown, after: unknown) {

@@ -7,9 +7,11 @@ import type { ThreadService } from './thread.service';
 
 /** The text form of a subject, back again. */
 function subjectFromKey(key: string): Subject {
-  const [kind, id, residueIndex] = key.split(':');
+  const found = /^(residue):([^:]+):(\d{1,9})$|^(annotation|mutant|structure):([^:]+)$/.exec(key);
   const parsed = subjectSchema.safeParse(
-    kind === 'residue' ? { kind, proteinId: id, residueIndex: Number(residueIndex) } : { kind, id },
+    found?.[1]
+      ? { kind: found[1], proteinId: found[2], residueIndex: Number(found[3]) }
+      : { kind: found?.[4], id: found?.[5] },
   );
   if (!parsed.success) throw notFound('subject');
   return parsed.data;

@@ -2,6 +2,7 @@ import type { z } from 'zod';
 import { subjectKey, type newMessageBody, type Subject } from '../../../shared/contracts';
 import type { Unit, UnitOfWork } from '../../db';
 import { newId } from '../../lib/new-id';
+import { conflict } from '../../lib/problem';
 import type { ProjectAccess } from '../projects';
 import { Message } from './message.entity';
 import type { SubjectDirectory } from './subject.directory';
@@ -26,8 +27,7 @@ export class ThreadService {
     await this.subjects.mustResolve(projectId, subject);
     return this.unitOfWork.write({ projectId, actorId: personId }, async (unit) => {
       const sent = await unit.manager.findOneBy(Message, { authorId: personId, clientKey });
-      if (sent)
-        return this.presentOne(unit, await unit.manager.findOneByOrFail(Thread, { id: sent.threadId }), sent);
+      if (sent) return this.again(unit, sent, { projectId, subject, text });
       const eventNumber = unit.nextEventNumber;
       const thread = await this.threadFor(unit, projectId, subject);
       Object.assign(thread, { messageCount: thread.messageCount + 1, lastEventNumber: eventNumber });
@@ -46,6 +46,19 @@ export class ThreadService {
       unit.announce('message.posted', message.id, posted);
       return posted;
     });
+  }
+
+  /** Sent again: the same answer, unless it is another message under a used key. */
+  private async again(
+    unit: Unit,
+    sent: Message,
+    { projectId, subject, text }: { projectId: string; subject: Subject; text: string },
+  ) {
+    const thread = await unit.manager.findOneByOrFail(Thread, { id: sent.threadId });
+    if (thread.projectId !== projectId || thread.subjectKey !== subjectKey(subject) || sent.text !== text) {
+      throw conflict('key-reused', 'This client key belongs to another message. Send it under a new key.');
+    }
+    return this.presentOne(unit, thread, sent);
   }
 
   private async presentOne(unit: Unit, row: Thread, sent: Message) {

@@ -1,5 +1,4 @@
-import { randomUUID } from 'node:crypto';
-import { createHash } from 'node:crypto';
+import { randomUUID, createHash } from 'node:crypto';
 import jwt from 'jsonwebtoken';
 import { auth, projects } from '@/shared/contracts';
 import { ask, mustAsk } from '@/tests/support/person';
