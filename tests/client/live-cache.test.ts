@@ -1,6 +1,6 @@
 import { InfiniteQueryObserver, QueryObserver, type QueryClient } from '@tanstack/react-query';
 import fc from 'fast-check';
-import { outOfDate, type Fact } from '@/client/facts';
+import { outOfDate, type Apply, type Fact } from '@/client/facts';
 import { byText, putNewer } from '@/client/keep-newer';
 import { liveCacheOf } from '@/client/live-cache';
 import { livePages } from '@/client/live-pages';
@@ -49,7 +49,7 @@ class SlowServer {
 }
 
 let clients: QueryClient[] = [];
-function open(read: () => Promise<Upload[]>, applyFact: typeof apply | (() => typeof outOfDate) = apply) {
+function open(read: () => Promise<Upload[]>, applyFact: Apply<Upload[]> = apply) {
   const client = makeQueryClient();
   clients.push(client);
   const options = liveQuery<Upload[]>({ projectId, queryKey: key, read, apply: applyFact });
