@@ -39,7 +39,7 @@ export async function ask<E extends Endpoint>(
   token: string | null,
   endpoint: E,
   input: Input<E> = {},
-): Promise<Answer<z.output<E['reply']> & Partial<Problem>>> {
+): Promise<Answer<z.output<E['reply']> & Omit<Partial<Problem>, 'status'>>> {
   const path = endpoint.path.replace(/:(\w+)/g, (_, name: string) =>
     encodeURIComponent(String((input.params as Record<string, unknown> | undefined)?.[name] ?? '')),
   );

@@ -88,7 +88,7 @@ const cases: [string, 'alignment' | 'structure', () => Uint8Array, string][] = [
 describe('a file that cannot be used', () => {
   it.each(cases)('%s (%s) says why and stores nothing but itself', async (_name, kind, bytes, code) => {
     const before = await rowsWritten();
-    const fields = kind === 'alignment' ? { kind, familyId } : { kind };
+    const fields: Record<string, string> = kind === 'alignment' ? { kind, familyId } : { kind };
     const { status, body } = await lead.upload(projectId, fields, 'file.txt', bytes());
     expect(status).toBe(201);
     const upload = await lead.settled(projectId, body.id);
