@@ -25,9 +25,10 @@ export function standingOf({ status, readiness }: Pick<ChainMap, 'status' | 'rea
 
 /** What must be equal for two chains to be one row. */
 function sameness(chain: ChainMap): string {
-  const { kind, status, readiness, familyId, proteinId, identity, coverage, reason, segments } = chain;
+  const { kind, readiness, familyId, proteinId, identity, coverage, reason, segments } = chain;
   const exceptions = chain.exceptions.map((one) => [one.kind, one.label, one.chainLetter, one.residueIndex]);
-  const alike = { kind, status, readiness, familyId, proteinId, identity, coverage, segments, exceptions };
+  const standing = standingOf(chain);
+  const alike = { kind, standing, readiness, familyId, proteinId, identity, coverage, segments, exceptions };
   return JSON.stringify({ ...alike, reason: proteinId ? '' : reason });
 }
 
@@ -48,6 +49,12 @@ export function groupChains(chains: readonly ChainMap[]): ChainGroup[] {
       return [{ key: first.chainId, standing: standingOf(first), first, chains: alike, names }];
     })
     .sort((one, other) => standings.indexOf(one.standing) - standings.indexOf(other.standing));
+}
+
+/** How alike chains were decided, in one word. */
+export function decidedWord({ chains }: Pick<ChainGroup, 'chains'>): string {
+  const words = new Set(chains.map(({ status }) => status));
+  return (words.size === 1 ? chains[0]?.status : null) ?? 'decided';
 }
 
 /** How many chains stand so. */

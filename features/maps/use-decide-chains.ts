@@ -11,6 +11,8 @@ export interface DecideChains {
   decide: (chains: readonly ChainMap[], body: MapDecision) => void;
   /** While they are decided, one after the other. */
   progress: { done: number; total: number } | null;
+  /** Chain ids of the last decision. */
+  about: readonly string[];
   problem: ApiProblem | null;
   /** What stands there now, when somebody else decided first. */
   conflict: ChainMap | null;
@@ -20,7 +22,9 @@ export interface DecideChains {
 export function useDecideChains(projectId: string): DecideChains {
   const { mutateAsync, error } = useDecideMap(projectId);
   const [progress, setProgress] = useState<DecideChains['progress']>(null);
+  const [about, setAbout] = useState<readonly string[]>([]);
   const run = async (chains: readonly ChainMap[], body: MapDecision) => {
+    setAbout(chains.map(({ chainId }) => chainId));
     let next = body;
     for (const [at, { chainId, version }] of chains.entries()) {
       setProgress({ done: at, total: chains.length });
@@ -40,6 +44,7 @@ export function useDecideChains(projectId: string): DecideChains {
         })
         .finally(() => setProgress(null)),
     progress,
+    about,
     problem: error,
     conflict,
   };

@@ -105,6 +105,15 @@ export function AlignmentRows({ projectId, alignment }: AlignmentRowsProps) {
   );
 }
 
+const oneLine: CSSProperties = { overflow: 'hidden', textOverflow: 'ellipsis', whiteSpace: 'nowrap' };
+const twoLines: CSSProperties = {
+  display: '-webkit-box',
+  WebkitBoxOrient: 'vertical',
+  WebkitLineClamp: 2,
+  overflow: 'hidden',
+  overflowWrap: 'anywhere',
+};
+
 function RowName({ href, name, organism }: { href: string; name: string; organism: string }) {
   const isRenamed = organism !== name;
   return (
@@ -118,21 +127,8 @@ function RowName({ href, name, organism }: { href: string; name: string; organis
         font: `400 12px/16px ${face.text}`,
       }}
     >
-      <span style={{ overflow: 'hidden', textOverflow: 'ellipsis', whiteSpace: 'nowrap' }}>
-        {isRenamed ? <i>{organism}</i> : name}
-      </span>
-      {isRenamed ? (
-        <span
-          style={{
-            overflow: 'hidden',
-            textOverflow: 'ellipsis',
-            whiteSpace: 'nowrap',
-            color: color.inkSoft,
-          }}
-        >
-          {name}
-        </span>
-      ) : null}
+      <span style={isRenamed ? oneLine : twoLines}>{isRenamed ? <i>{organism}</i> : name}</span>
+      {isRenamed ? <span style={{ ...oneLine, color: color.inkSoft }}>{name}</span> : null}
     </Link>
   );
 }

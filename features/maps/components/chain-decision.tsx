@@ -26,6 +26,7 @@ export function ChainDecision({ projectId, group, families, deciding, isPrimary 
   const { first, chains, names, standing } = group;
   const [answer, setAnswer] = useState<Answer | undefined>(() => firstAnswer(group));
   const several = chains.length > 1;
+  const isAbout = chains.some(({ chainId }) => deciding.about.includes(chainId));
   const who = `${several ? 'chains' : 'chain'} ${names}`;
   const family = families.find(({ id }) => id === first.familyId)?.name ?? '';
   const { progress } = deciding;
@@ -66,7 +67,7 @@ export function ChainDecision({ projectId, group, families, deciding, isPrimary 
         value={chosen}
         onChange={(value) => setAnswer(value as Answer)}
       />
-      <DecisionProblem problem={deciding.problem} conflict={deciding.conflict} />
+      {isAbout ? <DecisionProblem problem={deciding.problem} conflict={deciding.conflict} /> : null}
       {chosen === 'confirm' ? (
         <Button {...button} onPress={() => decide({ decision: 'confirm' })}>{`Confirm ${names}`}</Button>
       ) : null}

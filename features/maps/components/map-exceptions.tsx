@@ -5,6 +5,7 @@ import { FamilyTag, Plate } from '@/components/residue';
 import { Button, Caption, List, ListRow, Mark, Stack } from '@/components/ui';
 import { residuePath } from '@/client/paths';
 import { useProtein } from '@/features/families';
+import { exceptionRuns } from '../exception-runs';
 import { countWords } from '../map-words';
 import { preferredLabel } from '../preferred-label';
 
@@ -33,7 +34,8 @@ export function MapExceptions({ projectId, chain, copies, family }: MapException
   const protein = useProtein(projectId, chain.exceptions.length > 0 ? chain.proteinId : null);
   const { exceptions, proteinId } = chain;
   if (exceptions.length === 0) return null;
-  const rows = isWhole ? exceptions : exceptions.slice(0, shownAtFirst);
+  const runs = exceptionRuns(exceptions);
+  const rows = isWhole ? runs : runs.slice(0, shownAtFirst);
   const plate = ({ residueIndex, proteinLetter }: ChainMap['exceptions'][number]) => {
     if (!family) return undefined;
     const named =
@@ -64,7 +66,7 @@ export function MapExceptions({ projectId, chain, copies, family }: MapException
         {(exception) => (
           <ListRow
             lead={plate(exception)}
-            title={`author ${exception.label}: ${exception.chainLetter}`}
+            title={`author ${exception.labels}: ${exception.letters}`}
             detail={exception.message}
             end={<Mark>{kindWords[exception.kind]}</Mark>}
             href={
@@ -75,8 +77,8 @@ export function MapExceptions({ projectId, chain, copies, family }: MapException
           />
         )}
       </List>
-      {rows.length < exceptions.length ? (
-        <Button onPress={() => setIsWhole(true)}>{`Show all ${exceptions.length}`}</Button>
+      {rows.length < runs.length ? (
+        <Button onPress={() => setIsWhole(true)}>{`Show all ${runs.length}`}</Button>
       ) : null}
     </Stack>
   );

@@ -1,10 +1,10 @@
 import Eye from 'lucide-react-native/icons/eye';
 import TriangleAlert from 'lucide-react-native/icons/triangle-alert';
 import { Mark } from '@/components/ui';
-import { doubts, type ChainGroup } from '../chain-groups';
+import { decidedWord, doubts, type ChainGroup } from '../chain-groups';
 
 /** How a group of chains stands, as an icon with a word. */
-export function StandingMark({ group }: { group: Pick<ChainGroup, 'standing' | 'first'> }) {
+export function StandingMark({ group }: { group: ChainGroup }) {
   const { standing, first } = group;
   switch (standing) {
     case 'choose':
@@ -22,7 +22,7 @@ export function StandingMark({ group }: { group: Pick<ChainGroup, 'standing' | '
     case 'ready':
       return <Mark tone="good">ready</Mark>;
     case 'decided':
-      return <Mark tone="good">{first.status}</Mark>;
+      return <Mark tone="good">{decidedWord(group)}</Mark>;
     case 'left out':
       return <Mark>left out</Mark>;
     case 'no protein':

@@ -1,5 +1,6 @@
 import type { Family } from '@/shared/contracts/families';
 import { FamilyTag } from '@/components/residue';
+import { color, face, radius } from '@/components/theme';
 import { List, ListRow, Text } from '@/components/ui';
 import { StandingMark, type ChainGroup } from '@/features/maps';
 import { chainSentence } from '../chain-words';
@@ -11,14 +12,27 @@ export interface ChainsProps {
   onOpen: (group: ChainGroup) => void;
 }
 
+/** The tag of a family, or an empty frame of its size where none is known. */
 export function FamilyOf({ family }: { family: Family | undefined }) {
-  if (!family)
-    return (
-      <Text kind="small" tone="soft">
-        none
-      </Text>
-    );
-  return <FamilyTag family={family.name} part={family.part} />;
+  if (family) return <FamilyTag family={family.name} part={family.part} />;
+  return (
+    <span
+      role="img"
+      aria-label="no family"
+      style={{
+        display: 'inline-grid',
+        placeItems: 'center',
+        width: 36,
+        height: 32,
+        border: `1.5px dashed ${color.lineControl}`,
+        borderRadius: radius.plate,
+        color: color.inkSoft,
+        font: `700 16px/20px ${face.mono}`,
+      }}
+    >
+      ?
+    </span>
+  );
 }
 
 /** Chains of a structure as rows with a sentence, for a narrow screen. */

@@ -1,6 +1,7 @@
 import type { ChainMap } from '@/shared/contracts/maps';
 import {
   countOf,
+  decidedWord,
   doubts,
   groupChains,
   mismatchCount,
@@ -67,6 +68,16 @@ describe('chains are grouped', () => {
     ['a decision', { status: 'confirmed' as const }],
   ])('keeps a chain with %s apart', (_, change) => {
     expect(groupChains([chainOf('A'), chainOf('B', change), chainOf('C')])).toHaveLength(2);
+  });
+
+  it('keeps chains together that were decided in different words', () => {
+    const groups = groupChains([
+      chainOf('A', { status: 'confirmed' }),
+      chainOf('B', { status: 'corrected' }),
+    ]);
+    expect(groups.map(({ names }) => names)).toEqual(['A, B']);
+    expect(groups.map(decidedWord)).toEqual(['decided']);
+    expect(groupChains([chainOf('A', { status: 'corrected' })]).map(decidedWord)).toEqual(['corrected']);
   });
 
   it('lists first what needs a person', () => {
