@@ -1,4 +1,5 @@
-import { existsSync, readdirSync, readFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, readlinkSync } from 'node:fs';
+import { connect } from 'node:net';
 import path from 'node:path';
 import { alignments, families, projects, structures, uploads } from '@/shared/contracts';
 import { makeProject, signUp, type TestPerson } from '../../support/person';
@@ -215,6 +216,46 @@ describe('the form of an upload', () => {
       ]);
     }
     expect(await temporaryFiles()).toEqual([]);
+  });
+});
+
+describe('a client that goes away in the middle of a file', () => {
+  it('leaves no file and no open descriptor behind, however often', async () => {
+    const folder = path.join(server.container.files.pathOf('0'.repeat(64)), '..', '..', 'incoming');
+    const openFiles = () =>
+      readdirSync('/proc/self/fd').flatMap((name) => {
+        try {
+          const target = readlinkSync(`/proc/self/fd/${name}`);
+          return target.startsWith(folder) ? [target] : [];
+        } catch {
+          return [];
+        }
+      });
+    const { port } = new URL(server.origin);
+    const head = [
+      `POST /api/v1/projects/${projectId}/uploads HTTP/1.1`,
+      'Host: 127.0.0.1',
+      `Authorization: Bearer ${lead.token}`,
+      'Content-Type: multipart/form-data; boundary=xx',
+      'Content-Length: 5000000',
+      '',
+      '--xx\r\nContent-Disposition: form-data; name="file"; filename="a.afa"\r\n\r\n',
+    ].join('\r\n');
+    let arrived = 0;
+    for (let times = 0; times < 10; times += 1) {
+      const socket = connect(Number(port), '127.0.0.1');
+      socket.on('error', () => {});
+      socket.write(head + 'A'.repeat(200_000));
+      for (let tries = 0; tries < 100 && readdirSync(folder).length === 0; tries += 1)
+        await new Promise((done) => setTimeout(done, 5));
+      arrived += readdirSync(folder).length > 0 ? 1 : 0;
+      socket.destroy();
+      for (let tries = 0; tries < 100 && readdirSync(folder).length > 0; tries += 1)
+        await new Promise((done) => setTimeout(done, 20));
+    }
+    expect(arrived).toBe(10);
+    expect(readdirSync(folder)).toEqual([]);
+    expect(openFiles()).toEqual([]);
   });
 });
 
