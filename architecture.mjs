@@ -91,11 +91,12 @@ export const rooms = [
     advice: `Import another feature through its index. ${clientAdvice}`,
   },
   {
+    // A screen is imported by its own file: through an index every page would load the screens of all.
     room: 'app',
-    mayImport: ['features/*#index', 'components', 'client'],
+    mayImport: ['features/*#index', 'features/*/screens', 'components', 'client'],
     packages: { not: serverPackages },
     node: false,
-    advice: "app holds addresses only: re-export a screen from a feature's index.",
+    advice: 'app holds addresses only: re-export a screen from its own file.',
   },
   {
     room: 'server/lib',

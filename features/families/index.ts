@@ -8,4 +8,3 @@ export {
   useSetOffsetNumbering,
 } from './use-families';
 export { familyOptions } from './family-options';
-export { ProteinScreen } from './screens/protein-screen';

@@ -6,6 +6,7 @@ import Search from 'lucide-react-native/icons/search';
 import { projectParams } from '@/shared/contracts/common';
 import type { OwnProject } from '@/shared/contracts/projects';
 import { AppShell, EntryFrame, type Place } from '@/components/layout';
+import { useLayout } from '@/components/theme';
 import { Banner, IconButton, Link, NothingHere, ReadView, Stack } from '@/components/ui';
 import {
   findPath,
@@ -17,6 +18,7 @@ import {
   threadsPath,
 } from '@/client/paths';
 import { useKeys } from '@/client/use-keys';
+import { useConnection } from '@/client/use-live';
 import { useRouteParams } from '@/client/use-route-params';
 import { usePerson, useSignOut } from '@/features/auth';
 import { useLiveProject } from '@/features/projects';
@@ -24,7 +26,7 @@ import { LocatorBox } from '@/features/residues';
 import { KeysDialog } from './components/keys-dialog';
 import { LineNotice } from './components/line-notice';
 import { RailFoot } from './components/rail-foot';
-import { StandingWords } from './components/standing-words';
+import { standingWords } from './components/standing-words';
 import { WhoIsHere } from './components/who-is-here';
 import { useLineNews } from './use-line-news';
 
@@ -86,6 +88,8 @@ function Shell({ project }: { project: OwnProject }) {
   const person = usePerson();
   const signOut = useSignOut();
   const news = useLineNews();
+  const connection = useConnection();
+  const { hasRail } = useLayout();
   const [showsKeys, setShowsKeys] = useState(false);
   useKeys({
     '/': () => openLocator(() => router.push(locatePath(projectId) as never)),
@@ -115,7 +119,7 @@ function Shell({ project }: { project: OwnProject }) {
       }
       phoneEnd={<IconButton icon={Search} label="Find a residue" href={locatePath(projectId)} />}
       notice={hasNotice ? notice : undefined}
-      standing={<StandingWords invented={project.invented} />}
+      standing={standingWords(project.invented, connection, !hasRail)}
     >
       <Slot />
       <KeysDialog open={showsKeys} onClose={() => setShowsKeys(false)} />

@@ -57,6 +57,14 @@ function readUnfinished(text: string, protein: Protein, indexOf: (label: string)
   };
 }
 
+/** What is wrong, in one text; empty when nothing is. */
+export function errorsOf(view: Pick<ChangeView, 'issues'>): string {
+  return view.issues
+    .filter(({ severity }) => severity === 'error')
+    .map(({ message }) => message)
+    .join(' ');
+}
+
 /** `E62`, the beginning of a change at a residue; empty when it has no label. */
 export function beginningOfChange(protein: Protein, index: number): string {
   const label = labelOfResidue(preferredNumberingOf(protein), residueIndex(index));

@@ -35,6 +35,18 @@ export function checkLines(checks: readonly Check[]): CheckLine[] {
   return [...groups].map(([key, group]) => lineOf(key, group));
 }
 
+/** All checks of a design and, last, whether its product was read back. */
+export function linesOfDesign(design: Pick<Design, 'checks' | 'proved' | 'proof'>): CheckLine[] {
+  const proof: CheckLine = {
+    key: 'read-back',
+    result: design.proved ? 'passed' : 'failed',
+    name: 'Read back from the DNA',
+    value: design.proved ? 'this change and no other' : 'not proved',
+    limit: design.proof,
+  };
+  return [...checkLines(design.checks), proof];
+}
+
 function lineOf(key: string, group: readonly Check[]): CheckLine {
   const [first] = group;
   const label = first?.label ?? key;

@@ -9,7 +9,3 @@ export {
   useProjects,
 } from './use-projects';
 export { usePresence } from '@/client/use-live';
-export { NewProjectScreen } from './screens/new-project-screen';
-export { PeopleScreen } from './screens/people-screen';
-export { ProjectsScreen } from './screens/projects-screen';
-export { SettingsScreen } from './screens/settings-screen';

@@ -10,6 +10,4 @@ export { joinLines, type ThreadLine } from './thread-lines';
 export { usePostMessage, useThreadOfSubject, useThreads, type PostMessage } from './use-threads';
 export { composerPlace } from '@/client/queued-message';
 export { ThreadPanel, type ThreadPanelProps } from './components/thread-panel';
-export { ThreadScreen } from './screens/thread-screen';
-export { ThreadsScreen } from './screens/threads-screen';
 export { useResidueNames } from './use-residue-names';

@@ -1,1 +1,1 @@
-export { ProjectsScreen as default } from '@/features/projects';
+export { ProjectsScreen as default } from '@/features/projects/screens/projects-screen';

@@ -1,1 +1,1 @@
-export { NewProjectScreen as default } from '@/features/projects';
+export { NewProjectScreen as default } from '@/features/projects/screens/new-project-screen';

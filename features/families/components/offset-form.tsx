@@ -187,7 +187,7 @@ export function OffsetForm({ projectId, protein, numbering }: OffsetFormProps) {
             busyText={busyText}
           />
         ) : (
-          <Button kind="primary" submit busyText={busyText}>
+          <Button kind="primary" submit full busyText={busyText}>
             Save the numbering
           </Button>
         )}

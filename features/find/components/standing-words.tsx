@@ -1,22 +1,31 @@
+import type { ReactNode } from 'react';
 import CloudOff from 'lucide-react-native/icons/cloud-off';
 import Check from 'lucide-react-native/icons/check';
 import FlaskConical from 'lucide-react-native/icons/flask-conical';
 import { Mark } from '@/components/ui';
-import { useConnection } from '@/client/use-live';
+import type { Connection } from '@/client/realtime';
 
-/** At the end of every title block: the line, and whether what is shown was made up. */
-export function StandingWords({ invented }: { invented: boolean }) {
-  const connection = useConnection();
+const lines: Partial<Record<Connection, ReactNode>> = {
+  connected: <Mark icon={Check}>connected</Mark>,
+  connecting: <Mark>connecting</Mark>,
+  away: (
+    <Mark tone="warn" icon={CloudOff}>
+      no connection
+    </Mark>
+  ),
+};
+
+/**
+ * In every title block: the line, and whether what is shown was made up. The strip of a phone is short: `brief` says
+ * only what is not as usual. Null when there is nothing to say.
+ */
+export function standingWords(invented: boolean, connection: Connection, brief: boolean): ReactNode {
+  const line = brief && connection !== 'away' ? null : (lines[connection] ?? null);
+  if (!invented && line === null) return null;
   return (
     <>
       {invented ? <Mark icon={FlaskConical}>invented data</Mark> : null}
-      {connection === 'connected' ? <Mark icon={Check}>connected</Mark> : null}
-      {connection === 'connecting' ? <Mark>connecting</Mark> : null}
-      {connection === 'away' ? (
-        <Mark tone="warn" icon={CloudOff}>
-          no connection
-        </Mark>
-      ) : null}
+      {line}
     </>
   );
 }

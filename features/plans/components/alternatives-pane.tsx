@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import MessageSquare from 'lucide-react-native/icons/message-square';
 import { useLayout } from '@/components/theme';
-import { Button, Caption, Link, Stack, Text, Time } from '@/components/ui';
+import { Button, Caption, Link, Row, Stack, Text, Time } from '@/components/ui';
 import { constructPath, threadPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
 import type { Construct, Design, Mutant } from '@/shared/contracts/plans';
@@ -83,9 +83,11 @@ function Purpose({ projectId, mutant }: { projectId: string; mutant: Mutant }) {
           {`Construct ${mutant.constructName ?? ''}`}
         </Link>
       ) : null}
-      <Button icon={MessageSquare} href={threadPath(projectId, { kind: 'mutant', id: mutant.id })}>
-        Discuss this mutant
-      </Button>
+      <Row>
+        <Button icon={MessageSquare} href={threadPath(projectId, { kind: 'mutant', id: mutant.id })}>
+          Discuss this mutant
+        </Button>
+      </Row>
     </Stack>
   );
 }

@@ -1,6 +1,6 @@
 import { Caption, List, ListRow, Mark, Stack } from '@/components/ui';
 import type { Design } from '@/shared/contracts/plans';
-import { checkLines, worstOf } from '../check-words';
+import { linesOfDesign, worstOf } from '../check-words';
 
 interface AlternativesProps {
   designs: readonly Design[];
@@ -10,10 +10,15 @@ interface AlternativesProps {
 
 export const codonsOf = (design: Design): string => design.codons.map(({ codonTo }) => codonTo).join(', ');
 
+/** Of the others only what tells them apart: the line of each codon stands in the title already. */
+function reasonsShown({ reasons, codons }: Design, isShown: boolean): string[] {
+  return isShown ? reasons : reasons.filter((_, place) => place === 0 || place > codons.length);
+}
+
 function DesignMark({ design }: { design: Design }) {
   if (!design.proved) return <Mark tone="danger">not proved</Mark>;
   if (design.chosen) return <Mark tone="good">chosen</Mark>;
-  const worst = worstOf(checkLines(design.checks));
+  const worst = worstOf(linesOfDesign(design));
   if (worst === 'failed') return <Mark tone="danger">failed</Mark>;
   return worst === 'look' ? <Mark tone="warn">look</Mark> : <Mark tone="good">passes</Mark>;
 }
@@ -27,7 +32,7 @@ export function Alternatives({ designs, shownId, onShow }: AlternativesProps) {
         {(design) => (
           <ListRow
             title={`${design.rank}. complementary pair, ${codonsOf(design)}`}
-            detail={design.reasons.map((reason) => (
+            detail={reasonsShown(design, design.id === shownId).map((reason) => (
               <span key={reason} style={{ display: 'block' }}>
                 {reason}
               </span>

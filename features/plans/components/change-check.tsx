@@ -9,9 +9,8 @@ interface ChangeCheckProps {
   onTake: (change: string) => void;
 }
 
-/** What the protein says to a change while it is typed. */
+/** What the protein says to a change while it is typed; what is wrong stands at the field. */
 export function ChangeCheck({ view, residue, onTake }: ChangeCheckProps) {
-  const errors = view.issues.filter(({ severity }) => severity === 'error');
   const warnings = view.issues.filter(({ severity }) => severity === 'warning');
   return (
     <Stack gap={8}>
@@ -35,15 +34,6 @@ export function ChangeCheck({ view, residue, onTake }: ChangeCheckProps) {
         <Text tone="soft" role="status">
           {view.unfinished.sentence}
         </Text>
-      ) : null}
-      {errors.length > 0 ? (
-        <Banner kind="danger">
-          <Stack gap={4}>
-            {errors.map(({ message }) => (
-              <span key={message}>{message}</span>
-            ))}
-          </Stack>
-        </Banner>
       ) : null}
       {warnings.map(({ message }) => (
         <Banner key={message} kind="warn">

@@ -37,9 +37,7 @@ export function CodonTable({ projectId, construct, protein, part }: CodonTablePr
   };
   return (
     <Stack gap={8}>
-      <Caption count={`${rows.length} codons, ${protein.preferredNumbering} numbering`}>
-        Codons and residues
-      </Caption>
+      <Caption count={`${rows.length} codons`}>Codons and residues</Caption>
       <form
         noValidate
         onSubmit={(event) => {

@@ -1,5 +1,5 @@
 import Plus from 'lucide-react-native/icons/plus';
-import { Button, Caption, Empty, Link, Row, Stack, Text } from '@/components/ui';
+import { Button, Empty, Link, Row, Stack, Text } from '@/components/ui';
 import { newMutantPath, planPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
 import type { Mutant } from '@/shared/contracts/plans';
@@ -11,7 +11,7 @@ interface MutantPaneProps {
   currentId?: string;
 }
 
-/** The mutants of a project, as the first pane beside whichever of them is open. */
+/** The mutants of a project: it stays put while one of them is open beside it. */
 export function MutantPane({ projectId, mutants, currentId }: MutantPaneProps) {
   const may = useMay(projectId);
   return (
@@ -20,25 +20,14 @@ export function MutantPane({ projectId, mutants, currentId }: MutantPaneProps) {
         <Text kind="head" heading={2}>
           Mutations
         </Text>
-        {may('plan') ? (
+        {currentId && may('plan') ? (
           <Button kind="quiet" icon={Plus} href={newMutantPath(projectId)} label="Plan a mutation">
             Add
           </Button>
         ) : null}
       </Row>
-      <MutantList projectId={projectId} mutants={mutants} currentId={currentId} />
-      <Link href={planPath(projectId)}>Constructs and the primer list</Link>
-    </Stack>
-  );
-}
-
-export function MutantSection({ projectId, mutants }: Pick<MutantPaneProps, 'projectId' | 'mutants'>) {
-  const may = useMay(projectId);
-  return (
-    <Stack gap={4}>
-      <Caption count={mutants.length > 0 ? mutants.length : undefined}>Mutations</Caption>
       {mutants.length > 0 ? (
-        <MutantList projectId={projectId} mutants={mutants} />
+        <MutantList projectId={projectId} mutants={mutants} currentId={currentId} />
       ) : (
         <Empty title="No mutation planned yet">
           {may('plan')
@@ -46,6 +35,7 @@ export function MutantSection({ projectId, mutants }: Pick<MutantPaneProps, 'pro
             : 'Contributors, curators and leads plan mutations; you read here.'}
         </Empty>
       )}
+      {currentId ? <Link href={planPath(projectId)}>Constructs and the primer list</Link> : null}
     </Stack>
   );
 }

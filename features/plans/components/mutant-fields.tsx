@@ -5,8 +5,9 @@ import { Stack } from '@/components/ui';
 import { useFamilies, useProtein } from '@/features/families';
 import type { newMutantBody } from '@/shared/contracts/plans';
 import type { Host } from '@/shared/sequence/construct/codon-choice';
-import { viewChange } from '../change-view';
+import { errorsOf, viewChange } from '../change-view';
 import { useConstructs } from '../use-plans';
+import { useSettled } from '../use-settled';
 import { ChangeCheck } from './change-check';
 import { ConstructSelect } from './construct-select';
 import { HostSelect } from './host-select';
@@ -28,6 +29,9 @@ export function MutantFields({ projectId, form, host, onHost }: MutantFieldsProp
   const protein = useProtein(projectId, proteinId || null).data;
   const family = useFamilies(projectId).data?.find(({ id }) => id === protein?.familyId);
   const constructs = useConstructs(projectId).data;
+  const typed = useSettled(changes ?? '');
+  const view = protein ? viewChange(typed, protein) : null;
+  const wrong = view ? errorsOf(view) : '';
   const numbering = protein
     ? `Labels in the ${protein.preferredNumbering} numbering of ${protein.organism}. Changes made together are joined by +.`
     : 'Choose the protein first: its preferred numbering is named here.';
@@ -60,13 +64,13 @@ export function MutantFields({ projectId, form, host, onHost }: MutantFieldsProp
               mono
               required
               {...field}
-              error={fieldState.error?.message}
+              error={wrong || fieldState.error?.message}
             />
           )}
         />
-        {protein && family ? (
+        {view && protein && family ? (
           <ChangeCheck
-            view={viewChange(changes ?? '', protein)}
+            view={view}
             residue={{
               family: family.name,
               part: family.part,

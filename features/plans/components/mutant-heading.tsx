@@ -37,7 +37,7 @@ export function MutantHeading({ projectId, mutant, design }: MutantHeadingProps)
       </h1>
       {(design?.codons ?? []).map((codon) => (
         <Row key={codon.codonStart} gap={8} wrap>
-          <Text mono>{`${codon.residue.label}:`}</Text>
+          <Text>{`codon ${codon.residue.label}`}</Text>
           <span style={{ fontFamily: face.mono, fontWeight: 700 }}>{codon.codonFrom}</span>
           <Icon of={ArrowRight} label="to" sizePixels={16} />
           <span style={{ fontFamily: face.mono, fontWeight: 700 }}>{codon.codonTo}</span>

@@ -4,7 +4,7 @@ import TriangleAlert from 'lucide-react-native/icons/triangle-alert';
 import { Icon, List, ListRow } from '@/components/ui';
 import { mutantPath } from '@/client/paths';
 import type { Mutant } from '@/shared/contracts/plans';
-import { checkLines, leadingDesign, summaryOf, worstOf, type CheckResult } from '../check-words';
+import { leadingDesign, linesOfDesign, summaryOf, worstOf, type CheckResult } from '../check-words';
 import { ChangePlates } from './change-plates';
 
 const looks = {
@@ -31,7 +31,7 @@ export function MutantList({ projectId, mutants, currentId, label = 'Mutants' }:
     <List label={label} rows={mutants} keyOf={({ id }) => id}>
       {(mutant) => {
         const design = leadingDesign(mutant.designs);
-        const lines = design ? checkLines(design.checks) : null;
+        const lines = design ? linesOfDesign(design) : null;
         return (
           <ListRow
             lead={<ChangePlates mutations={mutant.mutations} />}

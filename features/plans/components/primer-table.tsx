@@ -16,9 +16,7 @@ const rows: readonly FigureRow[] = [
   {
     key: 'bases',
     name: 'bases, 5′ to 3′',
-    of: ({ bases }) => (
-      <span style={{ fontFamily: face.mono, whiteSpace: 'normal' }}>{inTriplets(bases)}</span>
-    ),
+    of: ({ bases }) => inTriplets(bases),
   },
   { key: 'length', name: 'length, nt', of: ({ length }) => length },
   { key: 'gc', name: 'G and C, %', of: ({ gcPercent }) => figure(gcPercent) },
@@ -56,8 +54,7 @@ export function PrimerTable({ design }: { design: Design }) {
           ...design.primers.map((primer) => ({
             key: primer.name,
             header: `${primer.name}, ${primer.strand === '+' ? 'forward' : 'reverse'}`,
-            numeric: true,
-            cell: ({ of }: FigureRow) => of(primer),
+            cell: ({ of }: FigureRow) => <span style={{ fontFamily: face.mono }}>{of(primer)}</span>,
           })),
         ]}
       />

@@ -19,11 +19,9 @@ export function PrimersOnTemplate({ construct, protein, design, part }: PrimersO
   const picture = primerPicture(construct, protein, design);
   if (!picture) return <Text tone="soft">The construct has changed since: design the primers again.</Text>;
   const size = construct.bases.length;
-  const numbering = protein?.preferredNumbering;
   return (
     <Stack gap={8}>
       <Caption
-        count={numbering ? `${numbering} numbering` : undefined}
         action={
           <Button kind="quiet" onPress={() => setAsTable(!asTable)}>
             {asTable ? 'As a drawing' : 'As a table'}

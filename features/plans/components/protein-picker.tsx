@@ -45,7 +45,7 @@ export function ProteinPicker({ projectId, value, onChange, error, name }: Prote
           placeholder={familyId ? 'Choose a protein' : 'Choose a family first'}
           options={(proteins.data ?? []).map((protein) => ({
             value: protein.id,
-            label: `${protein.organism}, ${protein.name}, ${protein.length} residues`,
+            label: [...new Set([protein.organism, protein.name]), `${protein.length} residues`].join(', '),
           }))}
           value={value}
           onChange={onChange}

@@ -32,13 +32,16 @@ export interface RefusalProps {
 export function Refusal({ outcome, problem }: RefusalProps) {
   if (!problem) return null;
   const issues = problem.problem.issues ?? [];
-  const saysMore = issues.some(({ message }) => !problem.message.includes(message));
+  // What the sentence says already is not said again; warnings were shown before it was sent.
+  const further = issues.filter(
+    ({ severity, message }) => severity === 'error' && !problem.message.includes(message),
+  );
   return (
     <Stack gap={8}>
       <Banner kind="danger">
         <b>{outcome}.</b> {problem.message}
       </Banner>
-      {saysMore ? <IssueList label={`${outcome}: why`} issues={issueViews(issues)} /> : null}
+      {further.length > 0 ? <IssueList label={`${outcome}: why`} issues={issueViews(further)} /> : null}
     </Stack>
   );
 }

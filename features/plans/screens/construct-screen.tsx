@@ -123,7 +123,7 @@ function OpenConstruct({ projectId, construct, mutants }: OpenConstructProps) {
                     </Empty>
                   )}
                 </Stack>
-                {hasRail ? action : null}
+                {hasRail && action ? <Row>{action}</Row> : null}
               </Stack>
             ),
           },

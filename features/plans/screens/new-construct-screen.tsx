@@ -5,7 +5,7 @@ import { useForm, useWatch } from 'react-hook-form';
 import { z } from 'zod';
 import { PageTitle, Panes, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Banner, Button, NothingHere, Stack, Text } from '@/components/ui';
+import { Banner, Button, NothingHere, Row, Stack, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { constructPath, planPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
@@ -22,6 +22,7 @@ import { Refusal } from '../components/refusal';
 import { StartChoices } from '../components/start-choices';
 import { geneticCodeWords } from '../condition-words';
 import type { StartSuggestion } from '../start-suggestions';
+import { useForgetRefusal } from '../use-forget-refusal';
 import { useFormDraft } from '../use-form-draft';
 import { useMakeConstruct } from '../use-plans';
 
@@ -55,6 +56,7 @@ function NewConstruct({ projectId, proteinId = '' }: { projectId: string; protei
     defaultValues: { name: '', dna: '', codingStart: 1, circular: false, geneticCode: 11, proteinId },
   });
   const draft = useFormDraft(`construct:${projectId}:${proteinId}`, form, draftShape);
+  useForgetRefusal(form, make);
   const values = useDeferredValue(useWatch({ control: form.control }) as ConstructValues);
   const protein = useProtein(projectId, values.proteinId || null).data;
   const { dna, codingStart, circular, geneticCode } = values;
@@ -122,7 +124,7 @@ function NewConstruct({ projectId, proteinId = '' }: { projectId: string; protei
                   <DraftElsewhere draft={draft} />
                   <ConstructFields projectId={projectId} form={form} />
                   <Refusal outcome="Not stored" problem={make.error} />
-                  {hasRail ? button : null}
+                  {hasRail ? <Row>{button}</Row> : null}
                 </Stack>
               </form>
             ),

@@ -5,7 +5,7 @@ import { useForm, useWatch } from 'react-hook-form';
 import { z } from 'zod';
 import { PageTitle, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Banner, Button, NothingHere, Stack } from '@/components/ui';
+import { Banner, Button, NothingHere, Row, Stack } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { mutantPath, planPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
@@ -17,6 +17,7 @@ import { beginningOfChange } from '../change-view';
 import { DraftElsewhere } from '../components/draft-elsewhere';
 import { MutantFields, type MutantValues } from '../components/mutant-fields';
 import { Refusal } from '../components/refusal';
+import { useForgetRefusal } from '../use-forget-refusal';
 import { useFormDraft } from '../use-form-draft';
 import { useConstructs, useDesign, useMakeMutant } from '../use-plans';
 
@@ -49,12 +50,14 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
   const design = useDesign(projectId);
   const [host, setHost] = useState<Host>('ecoli');
   const [made, setMade] = useState<Mutant>();
+  const [saidAtField, setSaidAtField] = useState(false);
   const form = useForm<MutantValues>({
     resolver: zodResolver(newMutantBody),
     defaultValues: { proteinId, changes, constructId: constructId ?? null, reason: '' },
   });
   const place = ['mutant', projectId, proteinId, residueIndex ?? '', constructId ?? '', changes].join(':');
   const draft = useFormDraft(place, form, draftShape);
+  useForgetRefusal(form, make);
   usePresets(projectId, form, { residueIndex, constructId });
   const values = useWatch({ control: form.control });
   const protein = useProtein(projectId, values.proteinId || null).data;
@@ -62,7 +65,7 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
 
   const submit = form.handleSubmit((body) =>
     make.mutate(body, {
-      onError: (error) => void showFieldErrors(error, fieldNames, form.setError),
+      onError: (error) => setSaidAtField(showFieldErrors(error, fieldNames, form.setError)),
       onSuccess: (mutant) => {
         draft.clear();
         if (mutant.constructId === null) {
@@ -130,10 +133,10 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
           ) : (
             <>
               <MutantFields projectId={projectId} form={form} host={host} onHost={setHost} />
-              <Refusal outcome="Not planned" problem={make.error} />
+              <Refusal outcome="Not planned" problem={saidAtField ? null : make.error} />
             </>
           )}
-          {hasRail ? button : null}
+          {hasRail ? <Row>{button}</Row> : null}
         </Stack>
       </form>
     </Screen>

@@ -12,7 +12,7 @@ import { leadingDesign } from '../check-words';
 import { Caution } from '../components/caution';
 import { ConstructList } from '../components/construct-list';
 import { ExportButton } from '../components/export-primers';
-import { MutantSection } from '../components/list-pane';
+import { MutantPane } from '../components/list-pane';
 import { concentrationWords } from '../condition-words';
 import { usePlan } from '../use-plan';
 
@@ -44,14 +44,11 @@ function Plan({ projectId }: { projectId: string }) {
           {
             key: 'mutants',
             label: 'Mutations',
-            widthPixels: 420,
+            widthPixels: 320,
             content: (
-              <Stack gap={12}>
-                <PageTitle quietOnPhone>Plan</PageTitle>
-                <ReadView of={plan} what="the plans">
-                  {(read) => <MutantSection projectId={projectId} mutants={read.mutants} />}
-                </ReadView>
-              </Stack>
+              <ReadView of={plan} what="the plans">
+                {(read) => <MutantPane projectId={projectId} mutants={read.mutants} />}
+              </ReadView>
             ),
           },
           {
@@ -59,7 +56,9 @@ function Plan({ projectId }: { projectId: string }) {
             label: 'Constructs and primers',
             content: plan.data ? (
               <Stack gap={20} style={{ maxWidth: 720 }}>
-                {hasRail ? <Row wrap>{actions}</Row> : null}
+                <PageTitle quietOnPhone action={hasRail ? <Row wrap>{actions}</Row> : null}>
+                  Plan
+                </PageTitle>
                 <Constructs projectId={projectId} constructs={plan.data.constructs} />
                 <PrimerList projectId={projectId} mutants={mutants} />
               </Stack>
@@ -114,16 +113,20 @@ function PrimerList({ projectId, mutants }: { projectId: string; mutants: readon
   const primers = listed.reduce((sum, design) => sum + design.primers.length, 0);
   return (
     <Stack gap={12}>
-      <Caption count={`${primers} primers of ${listed.length} mutants`}>Primer list</Caption>
+      <Caption count={`${primers} primers of ${listed.length} ${listed.length === 1 ? 'mutant' : 'mutants'}`}>
+        Primer list
+      </Caption>
       <Text tone="soft">
         The chosen design of each mutant, or its best one where none is chosen; only designs whose product was
         read back.
       </Text>
       <Caution />
-      <ExportButton
-        projectId={projectId}
-        offReason={primers === 0 ? 'No primers to export: design some for a mutant' : undefined}
-      />
+      <Row>
+        <ExportButton
+          projectId={projectId}
+          offReason={primers === 0 ? 'No primers to export: design some for a mutant' : undefined}
+        />
+      </Row>
     </Stack>
   );
 }

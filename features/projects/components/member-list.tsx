@@ -2,6 +2,7 @@ import { useState } from 'react';
 import UserMinus from 'lucide-react-native/icons/user-minus';
 import type { Member } from '@/shared/contracts/projects';
 import { Select } from '@/components/form';
+import { useLayout } from '@/components/theme';
 import { Banner, IconButton, List, ListRow, Person, Row, Stack } from '@/components/ui';
 import { usePerson } from '@/client/session';
 import { usePresence } from '@/client/use-live';
@@ -19,6 +20,7 @@ interface MemberListProps {
 
 export function MemberList({ projectId, projectName, members, mayManage }: MemberListProps) {
   const own = usePerson()?.id;
+  const { hasRail } = useLayout();
   const presence = usePresence(projectId);
   const change = useChangeMember(projectId);
   const [leaving, setLeaving] = useState<Leaving | null>(null);
@@ -36,8 +38,15 @@ export function MemberList({ projectId, projectName, members, mayManage }: Membe
     if (member.personId === own) setLeaving({ member, becomes: role });
     else change.mutate({ personId: member.personId, role });
   };
+  const isHere = ({ personId }: Member) => presence.live && presence.people.some(({ id }) => id === personId);
+  // A phone has no room for the address beside the role.
   const detail = (member: Member) =>
-    [member.personId === own ? 'you' : '', member.email, isLast(member) && mayManage ? 'the only lead' : '']
+    [
+      member.personId === own ? 'you' : '',
+      hasRail || !mayManage ? member.email : '',
+      isHere(member) ? 'here now' : '',
+      isLast(member) && mayManage ? 'the only lead' : '',
+    ]
       .filter(Boolean)
       .join(', ');
   return (

@@ -4,7 +4,7 @@ import { Controller, useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { project as projectSchema, projectSettingsBody, type Project } from '@/shared/contracts/projects';
 import { Checkbox, TextInput } from '@/components/form';
-import { Banner, BothTexts, Button, Stack } from '@/components/ui';
+import { Banner, BothTexts, Button, Row, Stack } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { conflictOf } from '@/client/problem';
 import { useChangeProject } from '../use-projects';
@@ -93,9 +93,11 @@ export function SettingsForm({ project }: { project: Project }) {
             busyText={busyText}
           />
         ) : (
-          <Button kind="primary" submit busyText={busyText}>
-            Save the settings
-          </Button>
+          <Row>
+            <Button kind="primary" submit busyText={busyText}>
+              Save the settings
+            </Button>
+          </Row>
         )}
       </Stack>
     </form>

@@ -1,1 +1,1 @@
-export { FindScreen as default } from '@/features/find';
+export { FindScreen as default } from '@/features/find/screens/find-screen';

@@ -1,1 +1,1 @@
-export { LocateScreen as default } from '@/features/residues';
+export { LocateScreen as default } from '@/features/residues/screens/locate-screen';

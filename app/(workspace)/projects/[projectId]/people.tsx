@@ -1,1 +1,1 @@
-export { PeopleScreen as default } from '@/features/projects';
+export { PeopleScreen as default } from '@/features/projects/screens/people-screen';

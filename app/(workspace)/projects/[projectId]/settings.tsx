@@ -1,1 +1,1 @@
-export { SettingsScreen as default } from '@/features/projects';
+export { SettingsScreen as default } from '@/features/projects/screens/settings-screen';

@@ -1,1 +1,1 @@
-export { NewUploadScreen as default } from '@/features/uploads';
+export { NewUploadScreen as default } from '@/features/uploads/screens/new-upload-screen';

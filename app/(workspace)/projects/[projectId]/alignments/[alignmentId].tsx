@@ -1,1 +1,1 @@
-export { AlignmentScreen as default } from '@/features/alignments';
+export { AlignmentScreen as default } from '@/features/alignments/screens/alignment-screen';

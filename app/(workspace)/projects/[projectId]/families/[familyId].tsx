@@ -1,1 +1,1 @@
-export { FamilyScreen as default } from '@/features/find';
+export { FamilyScreen as default } from '@/features/find/screens/family-screen';

@@ -1,1 +1,1 @@
-export { MutantScreen as default } from '@/features/plans';
+export { MutantScreen as default } from '@/features/plans/screens/mutant-screen';

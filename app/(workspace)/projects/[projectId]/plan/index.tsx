@@ -1,1 +1,1 @@
-export { PlanScreen as default } from '@/features/plans';
+export { PlanScreen as default } from '@/features/plans/screens/plan-screen';

@@ -1,1 +1,1 @@
-export { NewMutantScreen as default } from '@/features/plans';
+export { NewMutantScreen as default } from '@/features/plans/screens/new-mutant-screen';

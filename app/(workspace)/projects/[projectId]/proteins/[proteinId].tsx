@@ -1,1 +1,1 @@
-export { ProteinScreen as default } from '@/features/families';
+export { ProteinScreen as default } from '@/features/families/screens/protein-screen';

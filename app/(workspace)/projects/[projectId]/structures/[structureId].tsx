@@ -1,1 +1,1 @@
-export { StructureScreen as default } from '@/features/structures';
+export { StructureScreen as default } from '@/features/structures/screens/structure-screen';

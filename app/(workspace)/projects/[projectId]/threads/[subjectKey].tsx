@@ -1,1 +1,1 @@
-export { ThreadScreen as default } from '@/features/threads';
+export { ThreadScreen as default } from '@/features/threads/screens/thread-screen';

@@ -1,1 +1,1 @@
-export { ThreadsScreen as default } from '@/features/threads';
+export { ThreadsScreen as default } from '@/features/threads/screens/threads-screen';

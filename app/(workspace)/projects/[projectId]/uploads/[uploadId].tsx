@@ -1,1 +1,1 @@
-export { UploadScreen as default } from '@/features/uploads';
+export { UploadScreen as default } from '@/features/uploads/screens/upload-screen';

@@ -1,1 +1,1 @@
-export { ConstructScreen as default } from '@/features/plans';
+export { ConstructScreen as default } from '@/features/plans/screens/construct-screen';

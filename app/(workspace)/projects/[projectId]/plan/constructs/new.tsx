@@ -1,1 +1,1 @@
-export { NewConstructScreen as default } from '@/features/plans';
+export { NewConstructScreen as default } from '@/features/plans/screens/new-construct-screen';

@@ -1,1 +1,1 @@
-export { ResidueScreen as default } from '@/features/residues';
+export { ResidueScreen as default } from '@/features/residues/screens/residue-screen';
