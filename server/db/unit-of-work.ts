@@ -47,9 +47,14 @@ export class UnitOfWork {
   /** `work` returns what is answered; asked again under the same client key, the same is answered without working. */
   async write<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>): Promise<T> {
     for (let attempt = 0; ; attempt += 1) {
+      let isCommitting = false;
+      const once = () =>
+        this.once(scope, work, () => {
+          isCommitting = true;
+        });
       try {
         return await this.turns.take(scope.projectId, async () => {
-          const { reply, events } = await this.once(scope, work);
+          const { reply, events } = await once();
           // Still in its turn, so that events go out in the order of their numbers.
           if (events.length > 0) this.publish(events);
           return reply;
@@ -58,8 +63,9 @@ export class UnitOfWork {
         const hasKey = Boolean(requestContext()?.clientRequest);
         // A clash on the client's key means that the same request was just answered elsewhere: the retry finds it.
         const clashed = isDuplicate(error) && hasKey && attempt === 0;
-        // A lost connection may have been lost while committing: only a client's key makes trying again safe.
-        const again = isRetryable(error) || clashed || (isConnectionLost(error) && hasKey);
+        // Lost while committing, nobody knows whether it is written: only a client's key makes trying again safe.
+        const isSafelyLost = isConnectionLost(error) && (hasKey || !isCommitting);
+        const again = isRetryable(error) || clashed || isSafelyLost;
         if (again && attempt + 1 < attempts) {
           await wait(attempt);
           continue;
@@ -72,7 +78,7 @@ export class UnitOfWork {
     }
   }
 
-  private async once<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>) {
+  private async once<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>, onCommitting: () => void) {
     const context = requestContext();
     const actorId = scope.actorId ?? context?.actorId;
     if (!actorId) throw new Error('A unit of work needs somebody who acts.');
@@ -108,6 +114,7 @@ export class UnitOfWork {
           at: unit.at,
         });
       }
+      onCommitting();
       return { reply, events: unit.events };
     });
   }
