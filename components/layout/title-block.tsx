@@ -80,6 +80,11 @@ export function ContextStrip({ items, saved }: TitleBlockProps) {
         outlineOffset: -2,
       }}
     >
+      {saved === undefined ? null : (
+        <div role="status" style={{ padding: '7px 0 7px 16px', flex: 'none', whiteSpace: 'nowrap' }}>
+          {saved}
+        </div>
+      )}
       <dl style={{ display: 'flex', flex: 'none' }}>
         {items.map((item, place) => (
           <div
@@ -97,11 +102,6 @@ export function ContextStrip({ items, saved }: TitleBlockProps) {
           </div>
         ))}
       </dl>
-      {saved === undefined ? null : (
-        <div role="status" style={{ padding: '7px 12px', flex: 'none', whiteSpace: 'nowrap' }}>
-          {saved}
-        </div>
-      )}
     </div>
   );
 }

@@ -6,7 +6,9 @@ import { readSample } from '@/client/sample-file';
 import { useMakeUpload } from '@/features/uploads';
 import { sample } from './sample.data';
 
-/** Uploads the sample as one would upload a file of one's own; null where the project has no such family. */
+/** The sample, ready to be uploaded as a file of one's own would be; null where the project has no such family. */
+export type Sample = NonNullable<ReturnType<typeof useSample>>;
+
 export function useSample(projectId: string, families: readonly Family[], onMade: (made: Upload) => void) {
   const upload = useMakeUpload(projectId);
   const [fetching, setFetching] = useState(false);

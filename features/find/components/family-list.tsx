@@ -14,7 +14,7 @@ export function FamilyList({ projectId, families }: { projectId: string; familie
           href={familyPath(projectId, id)}
           lead={<FamilyTag family={name} part={part} />}
           title={description || partWords[part]}
-          detail={partWords[part]}
+          detail={description ? partWords[part] : undefined}
           end={proteinWords(proteinCount)}
         />
       )}

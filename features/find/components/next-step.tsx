@@ -1,23 +1,19 @@
-import { useRouter } from 'expo-router';
 import FileUp from 'lucide-react-native/icons/file-up';
 import Layers from 'lucide-react-native/icons/layers';
-import type { Family } from '@/shared/contracts/families';
 import { color, useLayout } from '@/components/theme';
 import { Banner, Button, Mark, Row, Stack, Text } from '@/components/ui';
-import { newUploadPath, uploadPath } from '@/client/paths';
-import { sample } from '../sample.data';
-import { useSample } from '../use-sample';
+import { newUploadPath } from '@/client/paths';
+import { sample as words } from '../sample.data';
+import type { Sample } from '../use-sample';
 
 interface NextStepProps {
   projectId: string;
-  families: readonly Family[];
+  sample: Sample | null;
 }
 
 /** The one next step of an empty project: an alignment, one's own or the sample. */
-export function NextStep({ projectId, families }: NextStepProps) {
-  const router = useRouter();
+export function NextStep({ projectId, sample }: NextStepProps) {
   const { hasRail } = useLayout();
-  const given = useSample(projectId, families, ({ id }) => router.push(uploadPath(projectId, id) as never));
   return (
     <section
       aria-label="Next step"
@@ -38,21 +34,45 @@ export function NextStep({ projectId, families }: NextStepProps) {
         <Text tone="soft">
           Aligned FASTA. Every problem is listed with line and column; nothing is half stored.
         </Text>
-        <Row wrap gap={8}>
-          <Button kind="primary" icon={FileUp} href={newUploadPath(projectId, 'alignment')}>
-            Upload an alignment
-          </Button>
-          {given ? (
-            <Button
-              onPress={() => void given.send()}
-              busyText={given.isSending ? 'Uploading the sample' : undefined}
-            >
-              {`Use the sample: family ${sample.family}, ${sample.rowCount} rows`}
-            </Button>
-          ) : null}
-        </Row>
-        {given?.problem ? <Banner kind="danger">{given.problem.message}</Banner> : null}
+        {sample ? (
+          <Text tone="soft">{`The sample is family ${words.family} of ${words.rowCount} invented organisms.`}</Text>
+        ) : null}
+        {hasRail ? (
+          <Row wrap gap={8}>
+            <NextStepButtons projectId={projectId} sample={sample} />
+          </Row>
+        ) : null}
+        {sample?.problem ? <Banner kind="danger">{sample.problem.message}</Banner> : null}
       </Stack>
     </section>
+  );
+}
+
+/** In the step itself on a wide screen, under the thumb on a phone. */
+export function NextStepButtons({ projectId, sample }: NextStepProps) {
+  const { hasRail } = useLayout();
+  const upload = (
+    <Button kind="primary" icon={FileUp} href={newUploadPath(projectId, 'alignment')}>
+      {hasRail ? 'Upload an alignment' : 'Upload a file'}
+    </Button>
+  );
+  const useIt = sample ? (
+    <Button
+      onPress={() => void sample.send()}
+      busyText={sample.isSending ? 'Uploading the sample' : undefined}
+    >
+      {hasRail ? `Use the sample: family ${words.family}, ${words.rowCount} rows` : 'Use the sample'}
+    </Button>
+  ) : null;
+  return hasRail ? (
+    <>
+      {upload}
+      {useIt}
+    </>
+  ) : (
+    <>
+      {useIt}
+      {upload}
+    </>
   );
 }

@@ -5,6 +5,7 @@ import { PageTitle } from '@/components/layout';
 import { Empty, Row, Stack, Text } from '@/components/ui';
 import { familyPath, newUploadPath, peoplePath } from '@/client/paths';
 import type { Holdings } from '../use-holdings';
+import type { Sample } from '../use-sample';
 import { AskCurators } from './ask-curators';
 import { FamiliesCaption } from './families-caption';
 import { NextStep } from './next-step';
@@ -14,9 +15,10 @@ interface StartProps {
   project: OwnProject;
   holdings: Holdings;
   mayUpload: boolean;
+  sample: Sample | null;
 }
 
-function stepsOf({ project, holdings, mayUpload }: StartProps): StartStep[] {
+function stepsOf({ project, holdings, mayUpload }: Omit<StartProps, 'sample'>): StartStep[] {
   const { families, members } = holdings;
   const names = members.map(({ name }) => name);
   const alone = names.length < 2;
@@ -78,7 +80,7 @@ export function Start(props: StartProps) {
       </div>
       <Stack gap={24}>
         {mayUpload ? (
-          <NextStep projectId={project.id} families={holdings.families} />
+          <NextStep projectId={project.id} sample={props.sample} />
         ) : (
           <AskCurators members={holdings.members} />
         )}

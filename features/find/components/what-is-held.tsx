@@ -77,12 +77,13 @@ export function WhatIsHeld({ project, holdings, mayUpload }: WhatIsHeldProps) {
 
 /** The two files a project is made of. */
 export function UploadButtons({ projectId }: { projectId: string }) {
+  const { hasRail } = useLayout();
   return (
     <Row gap={8} style={{ flexGrow: 1 }}>
-      <Button href={newUploadPath(projectId, 'structure')} full>
+      <Button href={newUploadPath(projectId, 'structure')} full={!hasRail}>
         Upload coordinates
       </Button>
-      <Button kind="primary" href={newUploadPath(projectId, 'alignment')} full>
+      <Button kind="primary" href={newUploadPath(projectId, 'alignment')} full={!hasRail}>
         Upload an alignment
       </Button>
     </Row>
