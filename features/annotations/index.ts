@@ -10,3 +10,5 @@ export {
   useMakeAnnotation,
   useSetAnnotationStatus,
 } from './use-annotations';
+export { NewPin, type PartnerField } from './components/new-pin';
+export { PinsSection } from './components/pins-section';
