@@ -73,14 +73,16 @@ function Plan({ projectId }: { projectId: string }) {
 /** The next step is the primary one: a construct first, then mutations. */
 function PlanActions({ projectId, empty }: { projectId: string; empty: boolean }) {
   const may = useMay(projectId);
+  const { hasRail } = useLayout();
   if (!may('plan')) return null;
+  const icon = hasRail ? Plus : undefined;
   const addConstruct = (
-    <Button key="construct" kind={empty ? 'primary' : 'plain'} icon={Plus} href={newConstructPath(projectId)}>
+    <Button key="construct" kind={empty ? 'primary' : 'plain'} icon={icon} href={newConstructPath(projectId)}>
       Add a construct
     </Button>
   );
   const planMutation = (
-    <Button key="mutation" kind={empty ? 'plain' : 'primary'} icon={Plus} href={newMutantPath(projectId)}>
+    <Button key="mutation" kind={empty ? 'plain' : 'primary'} icon={icon} href={newMutantPath(projectId)}>
       Plan a mutation
     </Button>
   );
