@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import { EntryFrame } from '@/components/layout';
+import { useLayout } from '@/components/theme';
 import { Banner, Link, Row, Stack, Text } from '@/components/ui';
 import type { ApiProblem } from '@/client/problem';
 import { EntryAside } from './entry-aside';
@@ -10,17 +11,25 @@ interface AccountFormProps {
   /** What went wrong, when no field says it. */
   problem: ApiProblem | null;
   other: { question: string; label: string; href: string };
+  /** Why one is here, when one did not come by oneself. */
+  note?: string;
+  /** Says on a phone too, above the form, what the product does. */
+  introduces?: boolean;
   children: ReactNode;
 }
 
 /** The frame that signing in and signing up share. */
-export function AccountForm({ title, onSubmit, problem, other, children }: AccountFormProps) {
+export function AccountForm(props: AccountFormProps) {
+  const { title, onSubmit, problem, other, note, introduces, children } = props;
+  const { hasRail } = useLayout();
   return (
     <EntryFrame aside={<EntryAside />}>
       <Stack gap={16}>
+        {introduces && !hasRail ? <EntryAside /> : null}
         <Text kind="head" heading={1}>
           {title}
         </Text>
+        {note && !problem ? <Banner>{note}</Banner> : null}
         {problem ? (
           <Banner kind="danger" announce>
             {problem.message}

@@ -8,9 +8,10 @@ import { useSession } from '@/client/session';
 export function SignedInOnly() {
   const session = useSession();
   const path = usePathname();
+  // What stands behind the question mark belongs to the address too.
+  const back = path === '/' ? undefined : path + (globalThis.location?.search ?? '');
   if (session.status === 'signed in') return <Slot />;
-  if (session.status === 'signed out')
-    return <Redirect href={signInPath(path === '/' ? undefined : path) as never} />;
+  if (session.status === 'signed out') return <Redirect href={signInPath(back) as never} />;
   return (
     <EntryFrame>
       {session.status === 'unreachable' ? (

@@ -6,6 +6,7 @@ import { TextInput } from '@/components/form';
 import { Button } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { signUpPath } from '@/client/paths';
+import { useSession } from '@/client/session';
 import { AccountForm } from '../components/account-form';
 import { useSignIn } from '../use-auth';
 import { useWayBack } from '../use-way-back';
@@ -13,6 +14,8 @@ import { useWayBack } from '../use-way-back';
 export function SignInScreen() {
   const { back, leave } = useWayBack();
   const signIn = useSignIn();
+  const session = useSession();
+  const hasRunOut = session.status === 'signed out' && session.expired;
   const { control, handleSubmit, setError } = useForm<z.input<typeof signInBody>>({
     resolver: zodResolver(signInBody),
     defaultValues: { email: '', password: '' },
@@ -26,6 +29,12 @@ export function SignInScreen() {
   return (
     <AccountForm
       title="Sign in"
+      introduces={!hasRunOut}
+      note={
+        hasRunOut
+          ? 'Your sign-in ran out. What you wrote is kept here; sign in to go on where you were.'
+          : undefined
+      }
       onSubmit={() => void submit()}
       problem={signIn.error}
       other={{ question: 'New here?', label: 'Make an account', href: signUpPath(back) }}
