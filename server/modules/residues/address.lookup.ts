@@ -32,6 +32,17 @@ interface ChainRow {
 
 const escapeLike = (text: string) => text.replace(/[\\%_]/g, (sign) => `\\${sign}`);
 
+/**
+ * A qualifier names the organism or the row it came from, in any case; blanks and underscores are the same. Null when
+ * nothing is left of it to look for.
+ */
+function patternOf(qualifier: string): string | null {
+  const words = qualifier.toLowerCase().replace(/_/g, ' ').trim();
+  return words === '' ? null : `%${escapeLike(words)}%`;
+}
+const likeQualifier = (...columns: string[]) =>
+  `REPLACE(LOWER(CONCAT_WS(' ', ${columns.join(', ')})), '_', ' ') LIKE ?`;
+
 /** Finds the residues of a project that a reading of an address can mean. One range read a reading. */
 export class AddressLookup {
   constructor(private readonly unitOfWork: UnitOfWork) {}
@@ -51,9 +62,10 @@ export class AddressLookup {
       values.push(reading.family);
     }
     if (reading.organism !== null) {
-      // A qualifier names the organism or the row it came from; blanks and underscores are the same.
-      conditions.push("REPLACE(LOWER(CONCAT(p.organism, ' ', p.name)), '_', ' ') LIKE ?");
-      values.push(`%${escapeLike(reading.organism.toLowerCase().replace(/_/g, ' ').trim())}%`);
+      const pattern = patternOf(reading.organism);
+      if (pattern === null) return [];
+      conditions.push(likeQualifier('p.organism', 'p.name'));
+      values.push(pattern);
     }
     if (reading.numbering !== null) {
       conditions.push('LOWER(n.name) = ?');
@@ -80,13 +92,17 @@ export class AddressLookup {
     }));
   }
 
-  /** A chain of a current structure and its author number; `unmapped` names those that lead to no protein residue. */
+  /**
+   * A chain of a current structure and its author number; behind `@` the structure may be named too. `unmapped` names
+   * those that lead to no protein residue.
+   */
   async byChain(
     projectId: string,
     reading: AddressReading,
   ): Promise<{ found: FoundResidue[]; unmapped: string[] }> {
     const label = readLabel(reading.label);
-    if (!label || reading.chainId === null) return { found: [], unmapped: [] };
+    const pattern = reading.organism === null ? '%' : patternOf(reading.organism);
+    if (!label || reading.chainId === null || pattern === null) return { found: [], unmapped: [] };
     const at = 'l.chain_index + ? - l.first_number';
     const rows: ChainRow[] = await this.unitOfWork.reader.query(
       `SELECT m.protein_id proteinId, g.protein_start + ${at} - g.chain_start residueIndex, p.organism,
@@ -98,7 +114,7 @@ export class AddressLookup {
          LEFT JOIN residue_map m ON m.chain_id = c.id AND m.status <> 'left out'
          LEFT JOIN map_segment g ON g.map_id = m.id AND g.chain_start <= ${at} AND g.chain_start + g.length > ${at}
          LEFT JOIN protein p ON p.id = m.protein_id
-        WHERE st.project_id = ? ORDER BY st.id`,
+        WHERE st.project_id = ? AND ${likeQualifier('p.organism', 'p.name', 'st.name')} ORDER BY st.id`,
       [
         label.number,
         label.number,
@@ -109,6 +125,7 @@ export class AddressLookup {
         label.number,
         label.number,
         projectId,
+        pattern,
       ],
     );
     const found: FoundResidue[] = [];
