@@ -1,10 +1,7 @@
-import { useCallback, useEffect, useRef, useState, type CSSProperties } from 'react';
-import { useRouter, type Href } from 'expo-router';
-import type { Reading } from '@/shared/contracts/residues';
+import { useEffect, useRef, useState, type CSSProperties } from 'react';
 import { color, layer, lift, useLayout } from '@/components/theme';
-import { residuePath } from '@/client/paths';
-import { useKeys } from '@/client/use-keys';
 import { useLocator, type Locator } from '../use-locator';
+import { useOpenReading } from '../use-open-reading';
 import { KeyHints } from './key-hints';
 import { LocatorInput } from './locator-input';
 import { ReadingList } from './reading-list';
@@ -13,21 +10,11 @@ import { ReadingPreview } from './reading-preview';
 const widest = 1000;
 const listWidth = 600;
 
-/** Opens what a reading means; a typed change goes along and is offered there. */
-export function useOpenReading(projectId: string): (reading: Reading) => void {
-  const router = useRouter();
-  return useCallback(
-    ({ residue, mutationTo }) => router.push(residuePath(projectId, residue, mutationTo) as Href),
-    [router, projectId],
-  );
-}
-
-/** The box that finds residues, with its panel under it; `/` goes there from anywhere. */
+/** The box that finds residues, with its panel under it. */
 export function LocatorBox({ projectId }: { projectId: string }) {
   const onOpen = useOpenReading(projectId);
   const locator = useLocator({ projectId, onOpen });
   const frame = useRef<HTMLDivElement>(null);
-  useKeys({ '/': () => frame.current?.querySelector('input')?.focus() });
   return (
     <div ref={frame} style={{ position: 'relative', minWidth: 0 }}>
       <LocatorInput locator={locator} />
