@@ -9,28 +9,18 @@ export interface ExcerptLine {
   after: string;
 }
 
-export interface ExcerptView {
-  lines: ExcerptLine[];
-  /** The column lies beyond the part of the line that is shown. */
-  isBeyond: boolean;
-}
-
-/** Lays the lines around an issue out; `line` and `column` count from 1, columns in characters. */
+/** Lays the lines around an issue out; `line` and the columns count from 1, columns in characters. */
 export function excerptView(
-  excerpt: { firstLine: number; lines: readonly string[] },
+  excerpt: { firstLine: number; firstColumn: number; lines: readonly string[] },
   place: { line: number; column?: number },
-): ExcerptView {
-  let isBeyond = false;
-  const lines = excerpt.lines.map((text, at): ExcerptLine => {
+): ExcerptLine[] {
+  return excerpt.lines.map((text, at) => {
     const number = excerpt.firstLine + at;
     const isMarked = number === place.line;
     if (!isMarked || place.column === undefined)
       return { number, isMarked, before: text, mark: '', after: '' };
     const characters = [...text];
-    const index = place.column - 1;
-    // A cut line ends in an ellipsis, which is no character of the file.
-    isBeyond = text.endsWith('…') && index >= characters.length - 1;
-    if (isBeyond) return { number, isMarked, before: text, mark: '', after: '' };
+    const index = place.column - excerpt.firstColumn;
     return {
       number,
       isMarked,
@@ -40,5 +30,4 @@ export function excerptView(
       after: characters.slice(index + 1).join(''),
     };
   });
-  return { lines, isBeyond };
 }

@@ -48,11 +48,11 @@ export function useUpload(projectId: string, uploadId: string) {
 }
 
 /** The lines of the file around one that has an error. A file never changes. */
-export function useExcerpt(projectId: string, uploadId: string, line: number | null) {
+export function useExcerpt(projectId: string, uploadId: string, line: number | null, column?: number) {
   return useQuery({
-    queryKey: key(projectId, uploadId, 'excerpt', line ?? 0),
+    queryKey: key(projectId, uploadId, 'excerpt', line ?? 0, column ?? 1),
     queryFn: ({ signal }) =>
-      call(uploads.excerpt, { params: { projectId, uploadId }, query: { line: line ?? 1 }, signal }),
+      call(uploads.excerpt, { params: { projectId, uploadId }, query: { line: line ?? 1, column }, signal }),
     enabled: line !== null,
     staleTime: Infinity,
   });

@@ -3,6 +3,8 @@ import { createReadStream } from 'node:fs';
 export interface Excerpt {
   /** Number of the first line shown, from 1. */
   firstLine: number;
+  /** Number of the first character shown of each line, from 1. */
+  firstColumn: number;
   lines: string[];
 }
 
@@ -18,19 +20,26 @@ function shown(bytes: number[], maxCharacters: number): string {
   return characters.length > maxCharacters ? `${characters.slice(0, maxCharacters).join('')}…` : text;
 }
 
+/** Bytes that continue a character of UTF-8 are no character of their own. */
+const beginsCharacter = (byte: number): boolean => (byte & 0xc0) !== 0x80;
+
 /**
  * The lines around `line` (from 1) of a file of any size and kind, read as a stream up to where they end. A line ends
- * with LF, CR LF or CR, as the readers count them.
+ * with LF, CR LF or CR, as the readers count them. A `column` (from 1) that would be cut off stands in the middle.
  */
 export async function readExcerpt(
   file: string,
   line: number,
-  { around = 3, maxCharacters = 200 } = {},
+  { around = 3, maxCharacters = 200, column = 1 } = {},
 ): Promise<Excerpt> {
   const firstLine = Math.max(1, line - around);
   const lastLine = line + around;
+  // Four bytes are the longest character.
+  const mostBytes = maxCharacters * 4 + 4;
+  const firstColumn = column < maxCharacters ? 1 : column - Math.floor(maxCharacters / 2);
   const lines: string[] = [];
   let number = 1;
+  let characters = 0;
   let kept: number[] = [];
   let empty = true;
   let afterReturn = false;
@@ -38,6 +47,7 @@ export async function readExcerpt(
     if (number >= firstLine) lines.push(shown(kept, maxCharacters));
     number += 1;
     kept = [];
+    characters = 0;
     empty = true;
   };
   for await (const chunk of createReadStream(file) as AsyncIterable<Buffer>) {
@@ -48,12 +58,13 @@ export async function readExcerpt(
       if (byte === lineFeed || byte === carriageReturn) end();
       else {
         empty = false;
-        // Four bytes are the longest character.
-        if (number >= firstLine && kept.length < maxCharacters * 4 + 4) kept.push(byte);
+        if (beginsCharacter(byte)) characters += 1;
+        const isShown = characters >= firstColumn && kept.length < mostBytes;
+        if (number >= firstLine && isShown) kept.push(byte);
       }
-      if (number > lastLine) return { firstLine, lines };
+      if (number > lastLine) return { firstLine, firstColumn, lines };
     }
   }
   if (!empty) end();
-  return { firstLine, lines };
+  return { firstLine, firstColumn, lines };
 }

@@ -63,8 +63,12 @@ export const uploads = {
     method: 'GET',
     path: '/projects/:projectId/uploads/:uploadId/excerpt',
     params: uploadParams,
-    query: z.strictObject({ line: z.coerce.number().int().min(1) }),
-    reply: z.object({ firstLine: z.int(), lines: z.array(z.string()) }),
+    /** From 1; a column far along a line moves what is shown of each line. */
+    query: z.strictObject({
+      line: z.coerce.number().int().min(1),
+      column: z.coerce.number().int().min(1).optional(),
+    }),
+    reply: z.object({ firstLine: z.int(), firstColumn: z.int(), lines: z.array(z.string()) }),
   }),
 };
 

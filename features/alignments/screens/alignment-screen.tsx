@@ -1,5 +1,5 @@
 import { alignments } from '@/shared/contracts/alignments';
-import { Screen } from '@/components/layout';
+import { PageTitle, Screen } from '@/components/layout';
 import { NothingHere, ReadView } from '@/components/ui';
 import { findPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
@@ -13,6 +13,7 @@ export function AlignmentScreen() {
   if (params) return <OneAlignment {...params} />;
   return (
     <Screen title="Alignment">
+      <PageTitle quietOnPhone>Alignment</PageTitle>
       <NothingHere />
     </Screen>
   );
@@ -27,6 +28,7 @@ function OneAlignment({ projectId, alignmentId }: { projectId: string; alignment
   }
   return (
     <Screen title="Alignment" backHref={findPath(projectId)}>
+      <PageTitle quietOnPhone>Alignment</PageTitle>
       <ReadView of={alignment} what="the alignment">
         {() => null}
       </ReadView>

@@ -1,5 +1,5 @@
 import { structures } from '@/shared/contracts/structures';
-import { Screen } from '@/components/layout';
+import { PageTitle, Screen } from '@/components/layout';
 import { NothingHere, ReadView } from '@/components/ui';
 import { findPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
@@ -13,6 +13,7 @@ export function StructureScreen() {
   if (params) return <OneStructure {...params} />;
   return (
     <Screen title="Structure">
+      <PageTitle quietOnPhone>Structure</PageTitle>
       <NothingHere />
     </Screen>
   );
@@ -25,6 +26,7 @@ function OneStructure({ projectId, structureId }: { projectId: string; structure
     return <StructurePage projectId={projectId} structure={structure.data} families={families.data} />;
   return (
     <Screen title="Structure" backHref={findPath(projectId)}>
+      <PageTitle quietOnPhone>Structure</PageTitle>
       <ReadView of={structure} what="the structure and its chains">
         {() => (
           <ReadView of={families} what="the families">

@@ -3,7 +3,7 @@ import { color, face } from '@/components/theme';
 import { excerptView, type ExcerptLine } from '../excerpt-view';
 
 interface FileExcerptProps {
-  excerpt: { firstLine: number; lines: readonly string[] };
+  excerpt: { firstLine: number; firstColumn: number; lines: readonly string[] };
   place: { line: number; column?: number };
   severity: 'error' | 'warning';
 }
@@ -21,7 +21,7 @@ const numberStyle: CSSProperties = {
 
 /** The text of the file around an issue, with numbered lines and the character in question marked. */
 export function FileExcerpt({ excerpt, place, severity }: FileExcerptProps) {
-  const { lines, isBeyond } = excerptView(excerpt, place);
+  const lines = excerptView(excerpt, place);
   return (
     <div style={{ display: 'grid', gap: 8 }}>
       <div
@@ -37,9 +37,9 @@ export function FileExcerpt({ excerpt, place, severity }: FileExcerptProps) {
           ))}
         </ol>
       </div>
-      {isBeyond ? (
+      {excerpt.firstColumn > 1 ? (
         <p style={{ font: `400 14px/20px ${face.text}`, color: color.inkSoft }}>
-          {`Column ${place.column} lies beyond the part of the line that is shown.`}
+          {`The lines are shown from column ${excerpt.firstColumn} on.`}
         </p>
       ) : null}
     </div>

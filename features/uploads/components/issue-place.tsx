@@ -16,7 +16,7 @@ interface IssuePlaceProps {
 /** The place of an issue in its file. */
 export function IssuePlace({ projectId, uploadId, issue, isAsked }: IssuePlaceProps) {
   const { hasRail } = useLayout();
-  const excerpt = useExcerpt(projectId, uploadId, issue.line ?? null);
+  const excerpt = useExcerpt(projectId, uploadId, issue.line ?? null, issue.column);
   const top = useRef<HTMLDivElement>(null);
   useEffect(() => {
     if (isAsked && !hasRail) top.current?.scrollIntoView({ block: 'start' });

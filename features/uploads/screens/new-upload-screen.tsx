@@ -21,6 +21,7 @@ export function NewUploadScreen() {
   if (given) return <NewUpload {...given} />;
   return (
     <Screen title="Upload">
+      <PageTitle quietOnPhone>Upload</PageTitle>
       <NothingHere />
     </Screen>
   );

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { uploads, type Upload } from '@/shared/contracts/uploads';
-import { Panes, Screen, type PaneItem } from '@/components/layout';
+import { PageTitle, Panes, Screen, type PaneItem } from '@/components/layout';
 import { NothingHere, ReadView } from '@/components/ui';
 import { findPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
@@ -19,6 +19,7 @@ export function UploadScreen() {
   if (params) return <OneUpload {...params} />;
   return (
     <Screen title="Upload">
+      <PageTitle quietOnPhone>Upload</PageTitle>
       <NothingHere />
     </Screen>
   );
@@ -31,6 +32,7 @@ function OneUpload({ projectId, uploadId }: { projectId: string; uploadId: strin
   if (upload.data) return <UploadPage projectId={projectId} upload={upload.data} />;
   return (
     <Screen title="Upload" backHref={findPath(projectId)}>
+      <PageTitle quietOnPhone>Upload</PageTitle>
       <ReadView of={upload} what="the upload">
         {() => null}
       </ReadView>

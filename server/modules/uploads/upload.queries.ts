@@ -41,9 +41,9 @@ export class UploadQueries {
     return presented;
   }
 
-  async excerpt(projectId: string, uploadId: string, line: number): Promise<Excerpt> {
+  async excerpt(projectId: string, uploadId: string, line: number, column?: number): Promise<Excerpt> {
     const upload = await this.row(projectId, uploadId);
-    return readExcerpt(this.files.pathOf(upload.fileHash), line);
+    return readExcerpt(this.files.pathOf(upload.fileHash), line, { column });
   }
 
   private async row(projectId: string, uploadId: string): Promise<Upload> {

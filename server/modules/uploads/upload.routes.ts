@@ -37,6 +37,6 @@ export function addUploadRoutes(
   });
   routes.add(uploads.excerpt, async ({ personId, params, query }) => {
     await projects.may(personId, params.projectId, 'read project');
-    return queries.excerpt(params.projectId, params.uploadId, query.line);
+    return queries.excerpt(params.projectId, params.uploadId, query.line, query.column);
   });
 }

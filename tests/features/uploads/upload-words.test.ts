@@ -59,34 +59,35 @@ describe('where an upload stands', () => {
 });
 
 describe('the place of an issue in its file', () => {
-  const excerpt = { firstLine: 3, lines: ['>one', 'MKVE', ''] };
+  const excerpt = { firstLine: 3, firstColumn: 1, lines: ['>one', 'MKVE', ''] };
 
   it('marks the character, counted from 1', () => {
-    const { lines } = excerptView(excerpt, { line: 4, column: 2 });
+    const lines = excerptView(excerpt, { line: 4, column: 2 });
     expect(lines[1]).toEqual({ number: 4, isMarked: true, before: 'M', mark: 'K', after: 'VE' });
     expect(lines.filter(({ isMarked }) => isMarked)).toHaveLength(1);
   });
 
   it('marks a blank behind the last character, where something is missing', () =>
-    expect(excerptView(excerpt, { line: 4, column: 5 }).lines[1]).toMatchObject({
+    expect(excerptView(excerpt, { line: 4, column: 5 })[1]).toMatchObject({
       before: 'MKVE',
       mark: '\u00a0',
     }));
 
   it('marks the line alone when no column is known', () =>
-    expect(excerptView(excerpt, { line: 3 }).lines[0]).toMatchObject({
+    expect(excerptView(excerpt, { line: 3 })[0]).toMatchObject({
       isMarked: true,
       before: '>one',
       mark: '',
     }));
 
-  it('counts characters, not code units', () =>
-    expect(excerptView({ firstLine: 1, lines: ['𝛼J'] }, { line: 1, column: 2 }).lines[0]?.mark).toBe('J'));
+  it('counts characters, not code units', () => {
+    const wide = { firstLine: 1, firstColumn: 1, lines: ['𝛼J'] };
+    expect(excerptView(wide, { line: 1, column: 2 })[0]?.mark).toBe('J');
+  });
 
-  it('says that a column lies beyond a line that is cut', () => {
-    const cut = { firstLine: 1, lines: ['MKV…'] };
-    expect(excerptView(cut, { line: 1, column: 4 }).isBeyond).toBe(true);
-    expect(excerptView(cut, { line: 1, column: 3 })).toMatchObject({ isBeyond: false });
+  it('finds the character in lines that are shown from further on', () => {
+    const further = { firstLine: 1, firstColumn: 301, lines: ['MKJE'] };
+    expect(excerptView(further, { line: 1, column: 303 })[0]).toMatchObject({ before: 'MK', mark: 'J' });
   });
 });
 
