@@ -1,6 +1,7 @@
+import TriangleAlert from 'lucide-react-native/icons/triangle-alert';
 import { color, face } from '@/components/theme';
 import { Button } from './button';
-import { Mark } from './mark';
+import { Icon } from './icon';
 
 export interface BothTextsProps {
   /** What was changed meanwhile, by whom if it is known: "Somebody changed these settings meanwhile." */
@@ -29,8 +30,9 @@ export function BothTexts({ sentence, rows, onTakeTheirs, onKeepMine, busyText }
         font: `400 14px/20px ${face.text}`,
       }}
     >
-      <p role="alert">
-        <Mark tone="warn">changed meanwhile</Mark> {sentence} Nothing of yours is lost.
+      <p role="alert" style={{ display: 'flex', gap: 10 }}>
+        <Icon of={TriangleAlert} tone="warn" label="warning" />
+        <span>{sentence} Nothing of yours is lost.</span>
       </p>
       {rows.map(({ key, name, theirs, mine }) => (
         <div key={key}>

@@ -36,11 +36,16 @@ export function toldAs(way: OffsetWay, values: Pick<OffsetValues, 'way' | 'numbe
   return String(way === 'one' ? placeOfOne(offset) : offset);
 }
 
+const usualName = 'mature';
+
 /** What the form starts with: a numbering that an offset made, or a new one. */
 export function valuesOf(protein: Protein, numbering: Numbering | undefined): OffsetValues {
   const known = numbering ? offsetOf(numbering) : null;
-  if (!numbering || !known)
-    return { name: 'mature', way: 'one', number: '1', skipZero: false, preferred: true };
+  if (!numbering || !known) {
+    const isTaken = protein.numberings.some(({ name }) => name === usualName);
+    const name = isTaken ? '' : usualName;
+    return { name, way: 'one', number: '1', skipZero: false, preferred: !isTaken };
+  }
   return {
     name: numbering.name,
     way: 'one',

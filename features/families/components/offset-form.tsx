@@ -40,15 +40,20 @@ export function OffsetForm({ projectId, protein, numbering }: OffsetFormProps) {
     resolver: zodResolver(offsetForm),
     defaultValues: valuesOf(protein, numbering),
   });
-  const { control, handleSubmit, setError, setValue, watch, reset } = form;
+  const { control, handleSubmit, setError, setValue, getValues, watch, reset } = form;
   const { isDirty } = form.formState;
   const values = watch();
   const offset = offsetIn(values);
   const theirs = conflictOf(act.error, proteinSchema);
-  // A form nobody has touched starts from what is true now.
+  // A form nobody has touched shows what is true now.
+  const numberingId = numbering?.id;
   useEffect(() => {
-    if (!isDirty) setBase(protein.version);
-  }, [isDirty, protein.version]);
+    if (isDirty || protein.version <= base) return;
+    const name = getValues('name');
+    const there = protein.numberings.find((one) => one.id === numberingId || one.name === name);
+    setBase(protein.version);
+    reset(valuesOf(protein, there));
+  }, [isDirty, base, protein, numberingId, getValues, reset]);
   const save = (version: number) =>
     void handleSubmit((written) =>
       act.mutate(

@@ -112,19 +112,23 @@ interface NumberingsProps {
   mayNumber: boolean;
 }
 
+const madeByOffset = ({ kind }: Numbering) => kind === 'offset';
+
 /** What the residues are called, and for a curator the way to add one numbering. */
 function Numberings({ projectId, protein, mayNumber }: NumberingsProps) {
-  const [changed, setChanged] = useState<Numbering>();
+  // The one there is is changed rather than doubled, until a new one is asked for.
+  const [changedId, setChangedId] = useState(() => protein.numberings.find(madeByOffset)?.id);
+  const changed = protein.numberings.find(({ id }) => id === changedId);
   return (
     <Stack gap={16}>
       <Caption count={protein.numberings.length}>Numberings</Caption>
-      <NumberingTable protein={protein} onChange={mayNumber ? setChanged : undefined} />
+      <NumberingTable protein={protein} onChange={mayNumber ? ({ id }) => setChangedId(id) : undefined} />
       {mayNumber ? (
         <>
           <Caption
             action={
               changed ? (
-                <Button kind="quiet" onPress={() => setChanged(undefined)}>
+                <Button kind="quiet" onPress={() => setChangedId(undefined)}>
                   Make a new one instead
                 </Button>
               ) : undefined

@@ -54,12 +54,14 @@ export function StartSteps({ steps }: { steps: readonly StartStep[] }) {
             </p>
             <p style={{ overflowWrap: 'anywhere' }}>{detail}</p>
           </div>
-          {state === 'done' ? (
-            <Mark tone="good" icon={CircleCheck}>
-              done
-            </Mark>
-          ) : null}
-          {state === 'next' ? <Mark tone="accent">next</Mark> : null}
+          <span style={{ flex: 'none', paddingTop: 4 }}>
+            {state === 'done' ? (
+              <Mark tone="good" icon={CircleCheck}>
+                done
+              </Mark>
+            ) : null}
+            {state === 'next' ? <Mark tone="accent">next</Mark> : null}
+          </span>
         </li>
       ))}
     </ol>

@@ -1,4 +1,14 @@
-import { bodyOf, offsetForm, offsetIn, ruleWords, toldAs } from '@/features/families/offset-form-values';
+import {
+  bodyOf,
+  offsetForm,
+  offsetIn,
+  ruleWords,
+  storedRule,
+  toldAs,
+  valuesOf,
+} from '@/features/families/offset-form-values';
+import type { Protein } from '@/shared/contracts/families';
+import { offsetNumbering } from '@/shared/sequence/numbering/numbering';
 
 const values = { name: 'mature', way: 'one', number: '51', skipZero: false, preferred: true } as const;
 
@@ -26,4 +36,42 @@ it('says a rule in words', () => {
   expect(ruleWords({ offset: -50, skipZero: true, preferred: false })).toBe(
     'sequence number minus 50, without zero, not preferred',
   );
+});
+
+const protein = (names: string[]): Protein => ({
+  id: '00000000-0000-4000-8000-000000000001',
+  familyId: '00000000-0000-4000-8000-000000000002',
+  organism: 'Orvella tarda',
+  name: 'c',
+  length: 20,
+  version: 3,
+  residues: 'MKTAYIAKQRQISFVKSHFS',
+  preferredNumbering: 'sequence',
+  numberings: names.map((name) => ({
+    id: '00000000-0000-4000-8000-000000000003',
+    name,
+    kind: 'offset',
+    segments: offsetNumbering(20, -10).segments.map((segment) => ({ ...segment })),
+  })),
+});
+
+it('starts from the numbering that is there', () => {
+  const there = protein(['mature']);
+  expect(valuesOf(there, there.numberings[0])).toEqual({
+    name: 'mature',
+    way: 'one',
+    number: '11',
+    skipZero: false,
+    preferred: false,
+  });
+});
+
+it('never offers a name under which something stands already', () => {
+  expect(valuesOf(protein([]), undefined).name).toBe('mature');
+  expect(valuesOf(protein(['mature']), undefined).name).toBe('');
+});
+
+it('says what stands under a name', () => {
+  expect(storedRule(protein(['mature']), 'mature')).toBe('sequence number minus 10, not preferred');
+  expect(storedRule(protein([]), 'mature')).toBe('no numbering of this name');
 });
