@@ -24,7 +24,10 @@ export function Caption({ children, count, action, level = 2, id }: CaptionProps
         font: `400 14px/20px ${face.text}`,
       }}
     >
-      <Heading id={id} style={{ font: `600 14px/20px ${face.text}`, color: color.ink }}>
+      <Heading
+        id={id}
+        style={{ font: `600 14px/20px ${face.text}`, color: color.ink, minWidth: 'min-content' }}
+      >
         {children}
       </Heading>
       {count === undefined ? null : <span style={{ color: color.inkSoft }}>{count}</span>}

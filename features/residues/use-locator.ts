@@ -33,6 +33,8 @@ export function useLocator({ projectId, onOpen, initialText = '', stays, opensOn
     (reading: Reading) => {
       setAsked(null);
       if (!stays) setText('');
+      // The page takes over: its keys would be letters in the box.
+      if (document.activeElement instanceof HTMLElement) document.activeElement.blur();
       onOpen(reading);
     },
     [onOpen, stays],

@@ -29,7 +29,11 @@ export function PinCard({ projectId, here, annotation, names }: PinCardProps) {
   return (
     <article
       aria-label={`${kind}, ${status}${viaEquivalence ? ', by equivalence' : ''}`}
-      style={{ padding: '12px 0 8px', font: `400 var(--body-size)/var(--body-line) ${face.text}` }}
+      style={{
+        margin: '12px 0 8px',
+        font: `400 var(--body-size)/var(--body-line) ${face.text}`,
+        ...(viaEquivalence ? { paddingLeft: 12, borderLeft: `1.5px dashed ${color.lineControl}` } : null),
+      }}
     >
       <Row gap={10} wrap>
         <h3 style={{ fontSize: 'inherit', fontWeight: 600 }}>{capital(kind)}</h3>
@@ -38,9 +42,9 @@ export function PinCard({ projectId, here, annotation, names }: PinCardProps) {
       </Row>
       {viaEquivalence ? (
         <p style={{ color: color.inkSoft, paddingTop: 4, lineHeight: '26px' }}>
-          From <ResiduePlate projectId={projectId} residue={viaEquivalence.residue} evidence="equivalence" />{' '}
-          in <em>{viaEquivalence.residue.organism}</em>, grade <Grade grade={viaEquivalence.grade} />, pinned
-          there, not here.
+          Pinned on{' '}
+          <ResiduePlate projectId={projectId} residue={viaEquivalence.residue} evidence="equivalence" /> in{' '}
+          <em>{viaEquivalence.residue.organism}</em>, not here. Grade <Grade grade={viaEquivalence.grade} />
         </p>
       ) : null}
       <div style={{ paddingTop: 4 }}>

@@ -56,12 +56,12 @@ function columnsOf(projectId: string, { residue }: Passport): TableColumn<Column
         if (row.kind === 'own') return 'this residue';
         if (row.kind === 'gap') return 'no equivalent';
         return (
-          <>
+          <Stack gap={0}>
             <Grade grade={row.equivalent.grade} />
             <Text kind="meta" tone="soft">
               {relationWords[row.equivalent.letterRelation]}
             </Text>
-          </>
+          </Stack>
         );
       },
     },

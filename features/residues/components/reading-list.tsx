@@ -59,7 +59,7 @@ function Group({ group, locator, id }: { group: ReadingGroup; locator: Locator; 
 }
 
 const countWords = (count: number, more: boolean): string =>
-  more ? `${count} readings of more` : `${count} ${count === 1 ? 'reading' : 'readings'}`;
+  `${more ? 'the first ' : ''}${count} ${count === 1 ? 'reading' : 'readings'}`;
 
 /** What the text can mean, by kind of reading, and what it was not read as. */
 export function ReadingList({ locator }: { locator: Locator }) {

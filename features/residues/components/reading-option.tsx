@@ -30,6 +30,10 @@ interface ReadingOptionProps {
 /** One thing the text can mean: which residue, why it is a reading, how many pins are there. */
 export function ReadingOption({ reading, highlighted, option }: ReadingOptionProps) {
   const { residue, mutationTo, mismatch, reason, pinCount } = reading;
+  // The numbering stands beside the name already.
+  const why = reason.startsWith(`${residue.numbering}; `)
+    ? reason.slice(residue.numbering.length + 2)
+    : reason;
   return (
     <div {...option} style={frame(highlighted)}>
       <Plate
@@ -49,7 +53,7 @@ export function ReadingOption({ reading, highlighted, option }: ReadingOptionPro
             {residue.numbering}, <em>{residue.organism}</em>
           </span>
         </div>
-        <div style={{ color: color.inkSoft }}>{reason}</div>
+        <div style={{ color: color.inkSoft }}>{why}</div>
         {mismatch ? <Mark tone="warn">{mismatch}</Mark> : null}
       </div>
       <span style={{ color: color.inkSoft, whiteSpace: 'nowrap' }}>{pinWords(pinCount)}</span>

@@ -2,6 +2,7 @@ import { useState } from 'react';
 import Send from 'lucide-react-native/icons/send';
 import { messageText, subjectKey, type Subject } from '@/shared/contracts/threads';
 import { TextArea } from '@/components/form';
+import { useLayout } from '@/components/theme';
 import { Banner, Button, Row, Text } from '@/components/ui';
 import type { DraftHandle } from '@/client/use-draft';
 import { useConnection, useTyping } from '@/client/use-live';
@@ -18,6 +19,7 @@ interface ComposerProps {
 
 /** Where a message is written. Enter makes a new line, Ctrl or Command with Enter sends. */
 export function Composer({ projectId, subject, draft, post, about }: ComposerProps) {
+  const { hasRail } = useLayout();
   const online = useConnection() === 'connected';
   const { typists, type } = useTyping(projectId, subjectKey(subject));
   const [refusal, setRefusal] = useState<string>();
@@ -83,7 +85,7 @@ export function Composer({ projectId, subject, draft, post, about }: ComposerPro
       />
       <Row justify="between" wrap>
         <Text kind="meta" tone="soft">
-          {text === '' ? 'Ctrl or Command and Enter sends' : 'draft kept as you type'}
+          {text === '' ? (hasRail ? 'Ctrl or Command and Enter sends' : '') : 'draft kept as you type'}
         </Text>
         <Button kind="primary" icon={Send} submit>
           {online ? 'Send' : 'Send later'}

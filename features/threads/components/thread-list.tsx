@@ -40,12 +40,14 @@ function Row({ projectId, thread, selected }: { projectId: string; thread: Threa
         ) : undefined
       }
       title={thread.caption}
-      detail={lastWords(thread)}
-      end={
+      detail={
         <>
-          {lastMessage ? <Time iso={lastMessage.at} /> : null}
-          <span style={{ display: 'block' }}>{messageCount}</span>
-          <span className="sr-only">{messageCount === 1 ? 'message' : 'messages'}</span>
+          {lastWords(thread)}
+          <span style={{ display: 'block', fontSize: 12, lineHeight: '16px', paddingTop: 2 }}>
+            {messageCount} {messageCount === 1 ? 'message' : 'messages'}
+            {lastMessage ? ', ' : ''}
+            {lastMessage ? <Time iso={lastMessage.at} /> : null}
+          </span>
         </>
       }
     />
