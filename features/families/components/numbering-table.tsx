@@ -49,7 +49,7 @@ export function NumberingTable({ protein, onChange }: NumberingTableProps) {
           ? [
               {
                 key: 'change',
-                header: '',
+                header: 'change',
                 cell: (numbering: Numbering) =>
                   numbering.kind === 'offset' ? (
                     <Button
