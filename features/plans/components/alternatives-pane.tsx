@@ -1,6 +1,6 @@
-import { useState } from 'react';
+import { useState, type CSSProperties, type ReactNode } from 'react';
 import MessageSquare from 'lucide-react-native/icons/message-square';
-import { useLayout } from '@/components/theme';
+import { color, useLayout } from '@/components/theme';
 import { Button, Caption, Link, Row, Stack, Text, Time } from '@/components/ui';
 import { constructPath, threadPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
@@ -34,7 +34,6 @@ export function AlternativesPane(props: AlternativesPaneProps) {
     <Stack gap={16}>
       {hasDesigns ? <Alternatives designs={mutant.designs} shownId={design?.id} onShow={onShow} /> : null}
       <Purpose projectId={projectId} mutant={mutant} />
-      <Caution />
       {acts.last && isStale ? (
         <StaleNotice
           problem={acts.problem}
@@ -45,14 +44,6 @@ export function AlternativesPane(props: AlternativesPaneProps) {
       ) : (
         <Refusal outcome={acts.refusedWhat} problem={acts.problem} />
       )}
-      {hasRail ? (
-        <MutantActions
-          projectId={projectId}
-          design={design}
-          isChoosing={acts.isChoosing}
-          onChoose={acts.choose}
-        />
-      ) : null}
       {may('plan') && hasDesigns && !asked ? (
         <Button onPress={() => setAsked(true)}>Design for another construct or host</Button>
       ) : null}
@@ -62,10 +53,41 @@ export function AlternativesPane(props: AlternativesPaneProps) {
           mutant={mutant}
           constructs={constructs}
           busy={acts.isDesigning}
-          onDesign={acts.design}
+          onDesign={(request) => {
+            setAsked(false);
+            acts.design(request);
+          }}
         />
       ) : null}
+      <NextStep isStuck={hasRail}>
+        <Caution />
+        {hasRail ? (
+          <MutantActions
+            projectId={projectId}
+            design={design}
+            isChoosing={acts.isChoosing}
+            onChoose={acts.choose}
+          />
+        ) : null}
+      </NextStep>
     </Stack>
+  );
+}
+
+/** The caution with its buttons; on a wide screen always in sight, however long the list above is. */
+function NextStep({ isStuck, children }: { isStuck: boolean; children: ReactNode }) {
+  const stuck: CSSProperties = {
+    position: 'sticky',
+    bottom: -18,
+    margin: '0 -20px -18px',
+    padding: '12px 20px 18px',
+    borderTop: `1px solid ${color.lineRule}`,
+    background: color.paper,
+  };
+  return (
+    <div style={isStuck ? stuck : undefined}>
+      <Stack gap={8}>{children}</Stack>
+    </div>
   );
 }
 

@@ -35,7 +35,7 @@ export function MutantList({ projectId, mutants, currentId, label = 'Mutants' }:
         return (
           <ListRow
             lead={<ChangePlates mutations={mutant.mutations} />}
-            title={design?.chosen ? `${mutant.state}, primers chosen` : mutant.state}
+            title={design?.chosen ? `${mutant.state}, chosen` : mutant.state}
             detail={detailOf(mutant, lines && summaryOf(lines))}
             end={lines ? <Icon {...looks[worstOf(lines)]} /> : undefined}
             href={mutantPath(projectId, mutant.id)}

@@ -119,7 +119,7 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
         { key: 'construct', label: 'Construct', value: construct?.name ?? 'none yet' },
         { key: 'scheme', label: 'Scheme', value: 'complementary pair' },
       ]}
-      saved="not planned yet"
+      saved={made ? undefined : 'not planned yet'}
     >
       <form noValidate onSubmit={(event) => void submit(event)}>
         <Stack gap={16}>

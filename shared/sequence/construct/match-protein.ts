@@ -2,6 +2,7 @@ import { compareLetters } from '../alphabet';
 import { alignPair, DEFAULT_GAP_RULES, fitsInMemory, type PairSegment } from '../mapping/pairwise';
 import type { Issue, ParseResult } from '../parse-result';
 import { residueIndex, type BaseIndex, type ResidueIndex } from '../positions';
+import { wrap } from './bases';
 import type { Coding } from './coding';
 import { findProtein } from './find-protein';
 import { KNOWN_TAGS } from './tags.data';
@@ -153,6 +154,17 @@ function findBreak(encoded: string, protein: string, segments: PairSegment[]): [
   return [Math.max(0, best.a - 1), Math.max(0, best.b - 1)];
 }
 
+/** What the DNA has where the protein no longer fits; bases from 1. `size` is needed only across the origin of a circle. */
+function breakWords(coding: Coding, codon: number, size: number | undefined): string {
+  const { codonStarts, protein, strand, hasStop } = coding;
+  const read = protein.charAt(codon);
+  if (read !== '') return `base ${(codonStarts[codon] ?? 0) + 1}, where the DNA reads ${read}`;
+  const lastCodon = codonStarts[protein.length - 1] ?? coding.start;
+  const unwrapped = lastCodon + (strand === '+' ? 2 : -2);
+  const last = (size === undefined ? unwrapped : wrap(unwrapped, size)) + 1;
+  return hasStop ? `where a stop follows base ${last}` : `where the DNA ends at base ${last}`;
+}
+
 /**
  * Which codon encodes which residue of a protein. The construct may add tags, lack an end or differ in single residues; these are
  * listed. Indices from 0; the bases named in issues count from 1, residues are named by `labelOf` (from 1 when it is left out).
@@ -183,7 +195,6 @@ export function matchProtein(
   const match = describe(coding, protein, segments);
   if (match.identity < limits.minimumIdentity || match.coverage < limits.minimumCoverage) {
     const [codon, residue] = findBreak(encoded, protein, segments);
-    const base = (coding.codonStarts[Math.min(codon, encoded.length - 1)] ?? 0) + 1;
     const label = labelOf(residueIndex(residue));
     const [elsewhere] = options.bases
       ? findProtein(options.bases, coding.circular, protein, coding.table)
@@ -193,7 +204,7 @@ export function matchProtein(
       : '';
     return refuse(
       'protein-not-encoded',
-      `The coding part does not encode this protein: the best match covers ${percent(match.coverage)} of it with ${percent(match.identity)} identical, and breaks at residue ${label} (${protein.charAt(residue)}), base ${base}, where the DNA reads ${encoded.charAt(codon) || 'its end'}.${hint}`,
+      `The coding part does not encode this protein: the best match covers ${percent(match.coverage)} of it with ${percent(match.identity)} identical, and breaks at residue ${label} (${protein.charAt(residue)}), ${breakWords(coding, codon, options.bases?.length)}.${hint}`,
       label,
     );
   }

@@ -106,3 +106,20 @@ test('an unrelated or empty protein is refused', () => {
   expect(matchProtein(codingOf(gene), '').issues[0]?.code).toBe('protein-empty');
   expect(matchProtein(codingOf(gene), 'WWWWWHHHHHCCCCCWWWWW').issues[0]?.code).toBe('protein-not-encoded');
 });
+
+test('a stop inside is where the protein breaks off: the base it follows is told', () => {
+  const at = 3 * 30;
+  const stopped = `${gene.slice(0, at)}TAA${gene.slice(at + 3)}`;
+  const { value, issues } = matchProtein(codingOf(stopped), PROTEIN, { bases: stopped });
+  expect(value).toBeNull();
+  expect(issues[0]).toMatchObject({ code: 'protein-not-encoded', residue: '31' });
+  expect(issues[0]?.message).toContain(
+    `breaks at residue 31 (${PROTEIN.charAt(30)}), where a stop follows base ${at}.`,
+  );
+});
+
+test('DNA that is cut off says where it ends', () => {
+  const cut = gene.slice(0, 3 * 30);
+  const { issues } = matchProtein(codingOf(cut), PROTEIN, { bases: cut });
+  expect(issues[0]?.message).toContain('where the DNA ends at base 90.');
+});
