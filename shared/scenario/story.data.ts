@@ -25,7 +25,7 @@ export interface MutantText {
 
 // Texts hold marks in braces that are filled in from the generated data, so that no letter and no number is typed here:
 // {c.carboxylate} a residue of the model organism, {c.carboxylate @ Cryorota nivalis} of another, {c.carboxylate > Q} a change,
-// {a.essential arginine # mature} in an offset numbering, {= nearest copy distance} a fact of the data.
+// {a.essential arginine # sequence} in a numbering that is not the one shown first, {= nearest copy distance} a fact of the data.
 
 const carboxylate: SiteName = { family: 'c', site: 'carboxylate' };
 const arginine: SiteName = { family: 'a', site: 'essential arginine' };
@@ -158,12 +158,12 @@ export const threadTexts: ThreadText[] = [
     messages: [
       [
         'brant',
-        'My notes say {a.essential arginine}, the model says A:{= arginine author number}. Are these one residue?',
+        'My notes say {a.essential arginine # sequence}, the model says A:{= arginine author number}. Are these one residue?',
       ],
       [
         'corrow',
         'Yes. The model counts the mature chain, which begins {= leader length} residues later: ' +
-          '{a.essential arginine # mature} there, {a.essential arginine} in the precursor.',
+          '{a.essential arginine} there, {a.essential arginine # sequence} in the precursor.',
       ],
       [
         'verrin',

@@ -23,11 +23,13 @@ export function makeStory(alignments: ScenarioAlignment[], model: ModelChain[]):
     const [, family, site = '', organism, numbering, changed = ''] = residueMark.exec(inner) ?? [];
     const residue = residueAtSite(alignments, family as ScenarioFamily, site, organism);
     if (!residue) return undefined;
-    const offset = offsetNumberings.find(
-      (known) =>
-        known.name === numbering && known.family === residue.family && known.organism === residue.organism,
-    )?.offset;
-    if (numbering !== undefined && offset === undefined) return undefined;
+    // Without a name, in the numbering people see first: the offset one where the protein has it.
+    const offsets = offsetNumberings.filter(
+      (known) => known.family === residue.family && known.organism === residue.organism,
+    );
+    const named = numbering === undefined ? offsets[0] : offsets.find((known) => known.name === numbering);
+    if (numbering !== undefined && numbering !== 'sequence' && named === undefined) return undefined;
+    const offset = numbering === 'sequence' ? 0 : named?.offset;
     return writeResidue(alignments, residue, offset) + changed;
   }
 
