@@ -5,7 +5,7 @@ const keys: { keys: string[]; does: string }[] = [
   { keys: ['/'], does: 'Find a residue' },
   { keys: ['[', ']'], does: 'Residue before and after, on a residue' },
   { keys: ['p'], does: 'Pin here, on a residue' },
-  { keys: ['r'], does: 'Reply, on a residue or in a thread' },
+  { keys: ['r'], does: 'Reply, on a residue' },
   { keys: ['Enter'], does: 'Open what is highlighted' },
   { keys: ['F6'], does: 'Next pane' },
   { keys: ['Esc'], does: 'Close what is open' },
