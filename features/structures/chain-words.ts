@@ -8,16 +8,18 @@ export function chainSentence({ first, standing }: ChainGroup): string {
   if (standing === 'no protein') return `${first.reason} ${letters(first)}.`;
   if (first.identity === null || first.coverage === null) return first.reason;
   const mismatches = countWords(mismatchCount(first), 'mismatch', 'mismatches');
-  return `${percentWords(first.identity)} identical, ${percentWords(first.coverage)} covered, ${mismatches}; runner-up ${runnerUpWords(first)}.`;
+  return `${percentWords(first.identity)} identical, ${percentWords(first.coverage)} covered, ${mismatches}; ${runnerUpName(first)} ${runnerUpWords(first)}.`;
 }
 
-/** `β 24 %`, with the organism where it is of the same family; said to be the nearest where nothing is proposed. */
+/** Where nothing is proposed, what is nearest is no runner-up. */
+export const runnerUpName = ({ proteinId }: ChainMap): string =>
+  proteinId === null ? 'nearest' : 'runner-up';
+
+/** `β 24 %`, with the organism where the family alone would not tell which. */
 export function runnerUpWords(chain: ChainMap): string {
   const next = runnerUp(chain);
   if (!next) return 'none near';
-  if (chain.proteinId === null)
-    return `nearest ${next.family} ${next.organism} ${percentWords(next.identity)}`;
-  const of = next.familyId === chain.familyId ? ` ${next.organism}` : '';
+  const of = chain.proteinId === null || next.familyId === chain.familyId ? ` ${next.organism}` : '';
   return `${next.family}${of} ${percentWords(next.identity)}`;
 }
 

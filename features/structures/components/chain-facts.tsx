@@ -9,7 +9,7 @@ import {
   shiftWords,
   stretchWords,
 } from '@/features/maps';
-import { runnerUpWords } from '../chain-words';
+import { runnerUpName, runnerUpWords } from '../chain-words';
 
 /** What is known of a chain and of how it lies on its protein. */
 export function ChainFacts({ projectId, chain }: { projectId: string; chain: ChainMap }) {
@@ -51,7 +51,9 @@ export function ChainFacts({ projectId, chain }: { projectId: string; chain: Cha
             value={shift === null ? 'no one shift from the sequence' : shiftWords(shift)}
           />
         ) : null}
-        {chain.kind === 'protein' ? <KeyValueRow name="runner-up" value={runnerUpWords(chain)} /> : null}
+        {chain.kind === 'protein' ? (
+          <KeyValueRow name={runnerUpName(chain)} value={runnerUpWords(chain)} />
+        ) : null}
         {chain.decidedBy ? (
           <KeyValueRow name={`${chain.status ?? ''} by`} value={chain.decidedBy.name} />
         ) : null}

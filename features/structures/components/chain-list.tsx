@@ -12,13 +12,13 @@ export interface ChainsProps {
   onOpen: (group: ChainGroup) => void;
 }
 
-/** The tag of a family, or an empty frame of its size where none is known. */
-export function FamilyOf({ family }: { family: Family | undefined }) {
+/** The tag of a family, or an empty frame of its size where none is known or the chain is no protein. */
+export function FamilyOf({ family, isProtein = true }: { family: Family | undefined; isProtein?: boolean }) {
   if (family) return <FamilyTag family={family.name} part={family.part} />;
   return (
     <span
       role="img"
-      aria-label="no family"
+      aria-label={isProtein ? 'no family yet' : 'not a protein'}
       style={{
         display: 'inline-grid',
         placeItems: 'center',
@@ -30,7 +30,7 @@ export function FamilyOf({ family }: { family: Family | undefined }) {
         font: `700 16px/20px ${face.mono}`,
       }}
     >
-      ?
+      {isProtein ? '?' : '–'}
     </span>
   );
 }
@@ -41,7 +41,12 @@ export function ChainList({ groups, families, openKey, onOpen }: ChainsProps) {
     <List label="Chains" rows={groups} keyOf={({ key }) => key}>
       {(group) => (
         <ListRow
-          lead={<FamilyOf family={families.get(group.first.familyId ?? '')} />}
+          lead={
+            <FamilyOf
+              family={families.get(group.first.familyId ?? '')}
+              isProtein={group.standing !== 'no protein'}
+            />
+          }
           title={
             <>
               <Text mono strong>

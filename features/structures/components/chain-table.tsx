@@ -1,10 +1,16 @@
+import type { ChainMap } from '@/shared/contracts/maps';
 import { face } from '@/components/theme';
 import { Row, Table, type TableColumn } from '@/components/ui';
 import { CoverageStrip, mismatchCount, percentWords, StandingMark, type ChainGroup } from '@/features/maps';
-import { runnerUpWords } from '../chain-words';
+import { runnerUpName, runnerUpWords } from '../chain-words';
 import { FamilyOf, type ChainsProps } from './chain-list';
 
 const orNone = (fraction: number | null): string => (fraction === null ? '' : percentWords(fraction));
+
+function nextCell(chain: ChainMap, standing: ChainGroup['standing']): string {
+  if (standing === 'no protein') return '';
+  return chain.proteinId === null ? `${runnerUpName(chain)} ${runnerUpWords(chain)}` : runnerUpWords(chain);
+}
 
 /** Chains of a structure as a table, for a wide screen. */
 export function ChainTable({ groups, families, openKey, onOpen }: ChainsProps) {
@@ -35,9 +41,9 @@ export function ChainTable({ groups, families, openKey, onOpen }: ChainsProps) {
     {
       key: 'family',
       header: 'family and organism',
-      cell: ({ first }) => (
+      cell: ({ first, standing }) => (
         <Row gap={10}>
-          <FamilyOf family={families.get(first.familyId ?? '')} />
+          <FamilyOf family={families.get(first.familyId ?? '')} isProtein={standing !== 'no protein'} />
           <i style={{ overflowWrap: 'anywhere' }}>{first.organism}</i>
         </Row>
       ),
@@ -61,7 +67,7 @@ export function ChainTable({ groups, families, openKey, onOpen }: ChainsProps) {
     {
       key: 'next',
       header: 'runner-up',
-      cell: ({ first, standing }) => (standing === 'no protein' ? '' : runnerUpWords(first)),
+      cell: ({ first, standing }) => nextCell(first, standing),
     },
     { key: 'standing', header: 'standing', cell: (group) => <StandingMark group={group} /> },
   ];

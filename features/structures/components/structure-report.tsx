@@ -20,7 +20,7 @@ interface StructureReportProps extends ChainsProps {
 /** A structure, how far its map is confirmed, and its chains in the order in which they need a person. */
 export function StructureReport(props: StructureReportProps) {
   const { structure, mayConfirm, problem, uploadHref, confirm, groups } = props;
-  const { hasRail } = useLayout();
+  const layout = useLayout();
   const { name, revision, title, fileName, by, at, waiting, chains, issues } = structure;
   const proteinCount = chains.filter(({ status }) => status !== null).length;
   const share = proteinCount === 0 ? 0 : (proteinCount - waiting) / proteinCount;
@@ -47,10 +47,10 @@ export function StructureReport(props: StructureReportProps) {
         sentence={isDone ? undefined : waitingWords(waiting, mayConfirm)}
       />
       {problem ? <Banner kind="danger">{problem}</Banner> : null}
-      {hasRail && confirm ? <Row>{confirm}</Row> : null}
+      {layout.hasRail && confirm ? <Row>{confirm}</Row> : null}
       <Stack gap={4}>
         <Caption count={counts}>Chains</Caption>
-        {hasRail ? <ChainTable {...props} /> : <ChainList {...props} />}
+        {layout.name === 'three' ? <ChainTable {...props} /> : <ChainList {...props} />}
       </Stack>
       {issues.length > 0 ? (
         <Stack gap={4}>

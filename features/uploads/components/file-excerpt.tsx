@@ -1,4 +1,4 @@
-import type { CSSProperties } from 'react';
+import { useEffect, useRef, type CSSProperties } from 'react';
 import { color, face } from '@/components/theme';
 import { excerptView, type ExcerptLine } from '../excerpt-view';
 
@@ -22,14 +22,21 @@ const numberStyle: CSSProperties = {
 /** The text of the file around an issue, with numbered lines and the character in question marked. */
 export function FileExcerpt({ excerpt, place, severity }: FileExcerptProps) {
   const lines = excerptView(excerpt, place);
+  const frame = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    const mark = frame.current?.querySelector('mark');
+    // The mark far along a line is brought to the middle of the frame; the page stays where it is.
+    if (mark && frame.current) frame.current.scrollLeft = mark.offsetLeft - frame.current.clientWidth / 2;
+  }, [excerpt, place.line, place.column]);
   return (
     <div style={{ display: 'grid', gap: 8 }}>
       <div
+        ref={frame}
         className="scroll-x"
         role="region"
         aria-label={`The file around line ${place.line}`}
         tabIndex={0}
-        style={{ background: color.sunken, borderRadius: 4, padding: '12px 14px' }}
+        style={{ position: 'relative', background: color.sunken, borderRadius: 4, padding: '12px 14px' }}
       >
         <ol style={{ width: 'max-content', minWidth: '100%', font: `400 14px/22px ${face.mono}` }}>
           {lines.map((line) => (
