@@ -23,7 +23,3 @@ export function onlyReading(found: { readings: readonly Reading[]; more: boolean
   const [only] = found.readings;
   return only && found.readings.length === 1 && !found.more && only.mismatch === null ? only : null;
 }
-
-/** `E59 to Q` as the planner takes it: E59Q. */
-export const changeText = ({ residue, mutationTo }: Reading): string | null =>
-  mutationTo === null ? null : `${residue.letter}${residue.label}${mutationTo}`;

@@ -1,5 +1,5 @@
 import type { Passport } from '@/shared/contracts/residues';
-import { wordsForCode } from '@/components/residue';
+import { wordsForCode } from '@/components/residue/residue-words';
 
 export interface PassportRow {
   name: string;

@@ -10,7 +10,7 @@ export function ReadingPreview({ projectId, reading }: { projectId: string; read
   if (!reading)
     return (
       <Text kind="small" tone="soft">
-        Highlight a reading with the arrow keys to see its passport here.
+        The passport of the highlighted reading stands here.
       </Text>
     );
   const { residue, mutationTo, pinCount } = reading;

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { projectParams } from '@/shared/contracts/common';
-import { Panes, Screen } from '@/components/layout';
+import { PageTitle, Panes, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
 import { NothingHere, Stack } from '@/components/ui';
 import { findPath } from '@/client/paths';
@@ -37,6 +37,7 @@ function Locate({ projectId, text }: { projectId: string; text?: string }) {
   });
   const list = (
     <Stack>
+      <PageTitle quietOnPhone>Find a residue</PageTitle>
       <LocatorInput locator={locator} large autoFocus />
       <ReadingList locator={locator} />
     </Stack>

@@ -5,7 +5,8 @@ import { TextArea } from '@/components/form';
 import { useLayout } from '@/components/theme';
 import { Banner, Button, Row, Text } from '@/components/ui';
 import type { DraftHandle } from '@/client/use-draft';
-import { useConnection, useTyping } from '@/client/use-live';
+import { useTyping } from '@/client/use-live';
+import { useOnline } from '../use-online';
 import type { PostMessage } from '../use-threads';
 
 interface ComposerProps {
@@ -20,7 +21,7 @@ interface ComposerProps {
 /** Where a message is written. Enter makes a new line, Ctrl or Command with Enter sends. */
 export function Composer({ projectId, subject, draft, post, about }: ComposerProps) {
   const { hasRail } = useLayout();
-  const online = useConnection() === 'connected';
+  const online = useOnline();
   const { typists, type } = useTyping(projectId, subjectKey(subject));
   const [refusal, setRefusal] = useState<string>();
   const text = draft.text ?? '';

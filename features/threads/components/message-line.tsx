@@ -1,5 +1,6 @@
 import type { CSSProperties, ReactElement } from 'react';
 import CircleX from 'lucide-react-native/icons/circle-x';
+import Send from 'lucide-react-native/icons/send';
 import WifiOff from 'lucide-react-native/icons/wifi-off';
 import { color, face } from '@/components/theme';
 import { Button, Mark, Markdown, Row, Time, type Linkify } from '@/components/ui';
@@ -56,7 +57,7 @@ export function MessageLine({ line, role, own, online, names, acts }: MessageLin
         <Markdown text={text} linkify={names} />
         {line.state === 'waiting' ? (
           <p style={{ paddingTop: 4 }}>
-            <Mark tone="warn" icon={WifiOff}>
+            <Mark tone={online ? 'soft' : 'warn'} icon={online ? Send : WifiOff}>
               {online ? 'on its way' : 'waiting, sent once you are online'}
             </Mark>
           </p>

@@ -3,10 +3,10 @@ import ArrowDown from 'lucide-react-native/icons/arrow-down';
 import { color, face, layer } from '@/components/theme';
 import { Button } from '@/components/ui';
 import { usePerson } from '@/client/session';
-import { useConnection } from '@/client/use-live';
 import { useMembers } from '@/features/projects';
 import { byDay, dayWords } from '../minutes';
 import type { ThreadLine } from '../thread-lines';
+import { useOnline } from '../use-online';
 import { useFollowEnd } from '../use-follow-end';
 import { useResidueNames } from '../use-residue-names';
 import { MessageLine, type LineActs } from './message-line';
@@ -26,7 +26,7 @@ const dayStyle = { padding: '10px 0 2px 52px', font: `400 12px/16px ${face.text}
 export function ThreadLog({ projectId, lines, acts, scrolls, earlier }: ThreadLogProps) {
   const ownId = usePerson()?.id;
   const names = useResidueNames(projectId);
-  const online = useConnection() === 'connected';
+  const online = useOnline();
   const { data: members } = useMembers(projectId);
   const days = useMemo(() => byDay(lines), [lines]);
   const { ref, onScroll, unseen, toEnd } = useFollowEnd(lines, ownId);

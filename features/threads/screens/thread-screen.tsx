@@ -1,8 +1,10 @@
+import { useRef } from 'react';
 import { threads, type Subject } from '@/shared/contracts/threads';
 import { Panes, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
 import { NothingHere, ReadView } from '@/components/ui';
 import { threadsPath } from '@/client/paths';
+import { useKeys } from '@/client/use-keys';
 import { useRouteParams } from '@/client/use-route-params';
 import { ThreadHeading } from '../components/thread-heading';
 import { ThreadList } from '../components/thread-list';
@@ -31,6 +33,8 @@ interface OneThreadProps {
 function OneThread({ projectId, subjectKey, subject }: OneThreadProps) {
   const { hasRail } = useLayout();
   const thread = useThreadOfSubject(projectId, subject);
+  const frame = useRef<HTMLDivElement>(null);
+  useKeys({ r: () => frame.current?.querySelector('textarea')?.focus() });
   const residue = thread.data?.residue;
   const items = [
     { key: 'on', label: 'On', value: thread.data?.caption ?? 'reading' },
@@ -44,6 +48,7 @@ function OneThread({ projectId, subjectKey, subject }: OneThreadProps) {
   // The thread is known or told missing here; the panel below shows the rest.
   const log = (
     <div
+      ref={frame}
       className="frame"
       style={{ display: 'flex', flexDirection: 'column', flex: 1, height: '100%', minHeight: 0 }}
     >
