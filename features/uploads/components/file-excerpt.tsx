@@ -12,11 +12,15 @@ const looks = {
   error: { ink: color.danger, ground: color.dangerSoft, on: color.dangerOn },
   warning: { ink: color.warn, ground: color.warnSoft, on: color.warnOn },
 };
+/** Line numbers stay while the text scrolls. */
 const numberStyle: CSSProperties = {
+  position: 'sticky',
+  left: 0,
   flex: 'none',
   minWidth: '5ch',
   textAlign: 'right',
-  marginRight: '1.5ch',
+  padding: '0 1.5ch 0 4px',
+  background: color.sunken,
 };
 
 /** The text of the file around an issue, with numbered lines and the character in question marked. */
@@ -36,7 +40,7 @@ export function FileExcerpt({ excerpt, place, severity }: FileExcerptProps) {
         role="region"
         aria-label={`The file around line ${place.line}`}
         tabIndex={0}
-        style={{ position: 'relative', background: color.sunken, borderRadius: 4, padding: '12px 14px' }}
+        style={{ position: 'relative', background: color.sunken, borderRadius: 4, padding: '12px 0' }}
       >
         <ol style={{ width: 'max-content', minWidth: '100%', font: `400 14px/22px ${face.mono}` }}>
           {lines.map((line) => (
@@ -66,7 +70,14 @@ function Line({ line, look }: { line: ExcerptLine; look: (typeof looks)[keyof ty
       >
         {number}
       </span>
-      <span style={{ flex: 1, whiteSpace: 'pre', background: isMarked ? look.ground : undefined }}>
+      <span
+        style={{
+          flex: 1,
+          whiteSpace: 'pre',
+          paddingRight: 14,
+          background: isMarked ? look.ground : undefined,
+        }}
+      >
         {before}
         {mark ? <mark style={{ background: look.ink, color: look.on, fontWeight: 700 }}>{mark}</mark> : null}
         {after}
