@@ -16,6 +16,8 @@ interface Filter {
   residueIndex?: number | undefined;
 }
 
+const listedAtMost = 500;
+
 export class PlanQueries {
   constructor(
     private readonly unitOfWork: UnitOfWork,
@@ -27,7 +29,7 @@ export class PlanQueries {
     const rows = await this.unitOfWork.reader.find(Construct, {
       where: { projectId },
       order: { id: 'DESC' },
-      take: 500,
+      take: listedAtMost,
     });
     return this.presentConstructs(rows);
   }
@@ -56,12 +58,30 @@ export class PlanQueries {
     });
   }
 
-  async mutants(projectId: string, { proteinId, residueIndex }: Filter): Promise<MutantContract[]> {
+  /** The newest first. */
+  async mutants(projectId: string, filter: Filter): Promise<MutantContract[]> {
+    return this.presentMutants(await this.page(projectId, filter));
+  }
+
+  /** Every mutant of the project, for an export that must leave none out; a page at a time. */
+  async allMutants(projectId: string): Promise<MutantContract[]> {
+    const all: MutantContract[] = [];
+    let before: string | undefined;
+    for (;;) {
+      const rows = await this.page(projectId, {}, before);
+      all.push(...(await this.presentMutants(rows)));
+      before = rows.at(-1)?.id;
+      if (rows.length < listedAtMost) return all;
+    }
+  }
+
+  private page(projectId: string, { proteinId, residueIndex }: Filter, before?: string): Promise<Mutant[]> {
     const query = this.unitOfWork.reader
       .createQueryBuilder(Mutant, 'mutant')
       .where('mutant.projectId = :projectId', { projectId })
       .orderBy('mutant.id', 'DESC')
-      .limit(500);
+      .limit(listedAtMost);
+    if (before !== undefined) query.andWhere('mutant.id < :before', { before });
     if (proteinId !== undefined) {
       const at = residueIndex === undefined ? '' : ' AND m.residue_index = :residueIndex';
       query.andWhere(
@@ -69,7 +89,7 @@ export class PlanQueries {
         { proteinId, residueIndex },
       );
     }
-    return this.presentMutants(await query.getMany());
+    return query.getMany();
   }
 
   async presentMutants(

@@ -48,7 +48,7 @@ export function addPlanRoutes(
   );
   routes.add(plans.primerList, async ({ personId, params, response }) => {
     const { project } = await projects.may(personId, params.projectId, 'export');
-    const csv = primerListCsv(await queries.mutants(params.projectId, {}), project.name, new Date());
+    const csv = primerListCsv(await queries.allMutants(params.projectId), project.name, new Date());
     response.attachment('primers.csv');
     return csv;
   });
