@@ -18,6 +18,7 @@ export const findPath = (projectId: string) => project(projectId);
 export const locatePath = (projectId: string, text?: string) =>
   withQuery(`${project(projectId)}/locate`, { text });
 export const peoplePath = (projectId: string) => `${project(projectId)}/people`;
+export const historyPath = (projectId: string) => `${project(projectId)}/history`;
 export const settingsPath = (projectId: string) => `${project(projectId)}/settings`;
 export const familyPath = (projectId: string, familyId: string) =>
   `${project(projectId)}/families/${familyId}`;

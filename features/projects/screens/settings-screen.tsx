@@ -1,7 +1,7 @@
 import { projectParams } from '@/shared/contracts/common';
 import { PageTitle, Screen } from '@/components/layout';
 import { Banner, KeyValueList, KeyValueRow, Link, NothingHere, Stack } from '@/components/ui';
-import { peoplePath } from '@/client/paths';
+import { historyPath, peoplePath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
 import { SettingsForm } from '../components/settings-form';
 import { motorWords } from '../motor-words.data';
@@ -46,6 +46,9 @@ function Settings({ projectId }: { projectId: string }) {
         )}
         <p>
           <Link href={peoplePath(projectId)}>People and what they may do</Link>
+        </p>
+        <p>
+          <Link href={historyPath(projectId)}>History: who did what</Link>
         </p>
       </Stack>
     </Screen>
