@@ -26,7 +26,7 @@ export function ShareBars({ shares, own, label }: ShareBarsProps) {
       {shares.map((entry) => (
         <li
           key={entry.letter}
-          style={{ display: 'grid', gridTemplateColumns: '24px 1fr 112px', gap: 10, alignItems: 'center' }}
+          style={{ display: 'grid', gridTemplateColumns: '24px 1fr 124px', gap: 10, alignItems: 'center' }}
         >
           <span style={{ fontFamily: face.mono, fontWeight: entry.letter === own ? 700 : 400 }}>
             {entry.letter === '-' ? <span aria-label="gap">–</span> : entry.letter}
@@ -42,7 +42,9 @@ export function ShareBars({ shares, own, label }: ShareBarsProps) {
               }}
             />
           </span>
-          <span style={{ fontFamily: face.mono, letterSpacing: -0.3 }}>{shareWords(entry)}</span>
+          <span style={{ fontFamily: face.mono, letterSpacing: -0.3, whiteSpace: 'nowrap' }}>
+            {shareWords(entry)}
+          </span>
         </li>
       ))}
     </ul>

@@ -55,6 +55,10 @@ export function useLocator({ projectId, onOpen, initialText = '', stays, opensOn
     onSelectedItemChange: ({ selectedItem }) => {
       if (selectedItem) open(selectedItem);
     },
+    onInputValueChange: ({ type }) => {
+      // The first Esc closes the list, the second empties the box.
+      if (type === types.InputKeyDownEscape) setText('');
+    },
   });
 
   // Other readings under the same highlight would be another choice.
