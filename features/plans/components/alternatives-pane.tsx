@@ -1,7 +1,7 @@
-import { useState, type CSSProperties, type ReactNode } from 'react';
+import { useEffect, useRef, useState, type CSSProperties, type ReactNode } from 'react';
 import MessageSquare from 'lucide-react-native/icons/message-square';
 import { color, useLayout } from '@/components/theme';
-import { Button, Caption, Link, Row, Stack, Text, Time } from '@/components/ui';
+import { Button, Caption, Row, Stack, Text, Time } from '@/components/ui';
 import { constructPath, threadPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
 import type { Construct, Design, Mutant } from '@/shared/contracts/plans';
@@ -34,16 +34,6 @@ export function AlternativesPane(props: AlternativesPaneProps) {
     <Stack gap={16}>
       {hasDesigns ? <Alternatives designs={mutant.designs} shownId={design?.id} onShow={onShow} /> : null}
       <Purpose projectId={projectId} mutant={mutant} />
-      {acts.last && isStale ? (
-        <StaleNotice
-          problem={acts.problem}
-          seen={acts.last.seen}
-          onAgain={acts.last.repeat}
-          onLeave={acts.leave}
-        />
-      ) : (
-        <Refusal outcome={acts.refusedWhat} problem={acts.problem} />
-      )}
       {may('plan') && hasDesigns && !asked ? (
         <Button onPress={() => setAsked(true)}>Design for another construct or host</Button>
       ) : null}
@@ -60,8 +50,13 @@ export function AlternativesPane(props: AlternativesPaneProps) {
         />
       ) : null}
       <NextStep isStuck={hasRail}>
+        {acts.problem ? (
+          <InSight>
+            <Notice acts={acts} />
+          </InSight>
+        ) : null}
         <Caution />
-        {hasRail ? (
+        {hasRail && !isStale ? (
           <MutantActions
             projectId={projectId}
             design={design}
@@ -72,6 +67,24 @@ export function AlternativesPane(props: AlternativesPaneProps) {
       </NextStep>
     </Stack>
   );
+}
+
+/** Why the last act was not done. */
+function Notice({ acts }: Pick<AlternativesPaneProps, 'acts'>) {
+  const { problem, last } = acts;
+  if (last && problem?.status === 412)
+    return <StaleNotice problem={problem} seen={last.seen} onAgain={last.repeat} onLeave={acts.leave} />;
+  return <Refusal outcome={acts.refusedWhat} problem={problem} />;
+}
+
+/** Comes into sight when it appears: its button may stand elsewhere. */
+function InSight({ children }: { children: ReactNode }) {
+  const box = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    // Some browsers answer with a promise, which is no clean-up.
+    void box.current?.scrollIntoView({ block: 'nearest' });
+  }, []);
+  return <div ref={box}>{children}</div>;
 }
 
 /** The caution with its buttons; on a wide screen always in sight, however long the list above is. */
@@ -100,12 +113,11 @@ function Purpose({ projectId, mutant }: { projectId: string; mutant: Mutant }) {
         {`${mutant.state}, by ${mutant.by.name}, `}
         <Time iso={mutant.at} />
       </Text>
-      {mutant.constructId ? (
-        <Link href={constructPath(projectId, mutant.constructId)}>
-          {`Construct ${mutant.constructName ?? ''}`}
-        </Link>
-      ) : null}
-      <Row>
+      {mutant.constructId ? <Text>{`In the construct ${mutant.constructName ?? ''}.`}</Text> : null}
+      <Row wrap>
+        {mutant.constructId ? (
+          <Button href={constructPath(projectId, mutant.constructId)}>Open the construct</Button>
+        ) : null}
         <Button icon={MessageSquare} href={threadPath(projectId, { kind: 'mutant', id: mutant.id })}>
           Discuss this mutant
         </Button>

@@ -23,7 +23,7 @@ export function ConstructSelect(props: ConstructSelectProps) {
     <Select
       label="Construct"
       hint={
-        constructs && fitting.length === 0 ? (
+        proteinId && constructs && fitting.length === 0 ? (
           <>
             No construct encodes this protein yet.{' '}
             <Link href={newConstructPath(projectId, proteinId || undefined)}>Add one</Link>

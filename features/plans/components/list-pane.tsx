@@ -1,5 +1,5 @@
 import Plus from 'lucide-react-native/icons/plus';
-import { Button, Empty, Link, Row, Stack, Text } from '@/components/ui';
+import { Button, Empty, Row, Stack, Text } from '@/components/ui';
 import { newMutantPath, planPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
 import type { Mutant } from '@/shared/contracts/plans';
@@ -21,7 +21,7 @@ export function MutantPane({ projectId, mutants, currentId }: MutantPaneProps) {
           Mutations
         </Text>
         {currentId && may('plan') ? (
-          <Button kind="quiet" icon={Plus} href={newMutantPath(projectId)} label="Plan a mutation">
+          <Button kind="quiet" icon={Plus} href={newMutantPath(projectId)} label="Add a mutation">
             Add
           </Button>
         ) : null}
@@ -35,7 +35,13 @@ export function MutantPane({ projectId, mutants, currentId }: MutantPaneProps) {
             : 'Contributors, curators and leads plan mutations; you read here.'}
         </Empty>
       )}
-      {currentId ? <Link href={planPath(projectId)}>Constructs and the primer list</Link> : null}
+      {currentId ? (
+        <Row>
+          <Button kind="quiet" href={planPath(projectId)}>
+            Constructs and the primer list
+          </Button>
+        </Row>
+      ) : null}
     </Stack>
   );
 }

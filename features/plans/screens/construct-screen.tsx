@@ -160,7 +160,10 @@ function Facts({ projectId, construct, coding, part }: FactsProps) {
         value={
           <Row gap={8} justify="end" wrap>
             <FamilyTag family={construct.family} part={part} />
-            <Link href={proteinPath(projectId, construct.proteinId)}>
+            <Link
+              href={proteinPath(projectId, construct.proteinId)}
+              style={{ display: 'inline-flex', alignItems: 'center', minHeight: 'var(--hit)' }}
+            >
               <em>{construct.organism}</em>
             </Link>
           </Row>

@@ -5,18 +5,18 @@ import { useForm, useWatch } from 'react-hook-form';
 import { z } from 'zod';
 import { PageTitle, Panes, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Banner, Button, NothingHere, Row, Stack, Text } from '@/components/ui';
+import { Button, NothingHere, Row, Stack, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { constructPath, planPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
 import { useProtein } from '@/features/families';
-import { useMay } from '@/features/projects';
 import { newConstructBody } from '@/shared/contracts/plans';
 import { reverseComplement } from '@/shared/sequence/construct/bases';
 import { asFasta, viewCoding } from '../coding-view';
 import { CodingFeedback } from '../components/coding-feedback';
 import { ConstructFields, type ConstructValues } from '../components/construct-fields';
 import { DraftElsewhere } from '../components/draft-elsewhere';
+import { PlannersOnly } from '../components/planners-only';
 import { RecordChoices } from '../components/record-choices';
 import { Refusal } from '../components/refusal';
 import { StartChoices } from '../components/start-choices';
@@ -44,12 +44,15 @@ const fieldNames = ['name', 'dna', 'codingStart', 'circular', 'geneticCode', 'pr
 export function NewConstructScreen() {
   const given = useRouteParams(params);
   if (!given) return <NothingHere />;
-  return <NewConstruct projectId={given.projectId} proteinId={given.proteinId} />;
+  return (
+    <PlannersOnly projectId={given.projectId} title="Add a construct">
+      <NewConstruct projectId={given.projectId} proteinId={given.proteinId} />
+    </PlannersOnly>
+  );
 }
 
 function NewConstruct({ projectId, proteinId = '' }: { projectId: string; proteinId?: string }) {
   const { hasRail } = useLayout();
-  const may = useMay(projectId);
   const make = useMakeConstruct(projectId);
   const form = useForm<ConstructValues>({
     resolver: zodResolver(newConstructBody),
@@ -83,7 +86,7 @@ function NewConstruct({ projectId, proteinId = '' }: { projectId: string; protei
       form.setValue('dna', asFasta({ ...record, bases: reverseComplement(record.bases) }));
     form.setValue('codingStart', start, { shouldDirty: true, shouldValidate: true });
   };
-  const button = may('plan') ? (
+  const button = (
     <Button
       kind="primary"
       full={!hasRail}
@@ -93,10 +96,6 @@ function NewConstruct({ projectId, proteinId = '' }: { projectId: string; protei
     >
       Add the construct
     </Button>
-  ) : (
-    <Banner kind="note" announce={false}>
-      Adding constructs is for contributors, curators and leads.
-    </Banner>
   );
   return (
     <Screen

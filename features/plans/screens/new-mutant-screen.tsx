@@ -10,11 +10,11 @@ import { showFieldErrors } from '@/client/field-errors';
 import { mutantPath, planPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
 import { useProtein } from '@/features/families';
-import { useMay } from '@/features/projects';
 import { newMutantBody, type Mutant } from '@/shared/contracts/plans';
 import type { Host } from '@/shared/sequence/construct/codon-choice';
 import { beginningOfChange } from '../change-view';
 import { DraftElsewhere } from '../components/draft-elsewhere';
+import { PlannersOnly } from '../components/planners-only';
 import { MutantFields, type MutantValues } from '../components/mutant-fields';
 import { Refusal } from '../components/refusal';
 import { useForgetRefusal } from '../use-forget-refusal';
@@ -40,12 +40,15 @@ const fieldNames = ['proteinId', 'changes', 'constructId', 'reason'] as const;
 export function NewMutantScreen() {
   const given = useRouteParams(params);
   if (!given) return <NothingHere />;
-  return <NewMutant key={JSON.stringify(given)} {...given} />;
+  return (
+    <PlannersOnly projectId={given.projectId} title="Plan a mutation">
+      <NewMutant key={JSON.stringify(given)} {...given} />
+    </PlannersOnly>
+  );
 }
 
 function NewMutant({ projectId, proteinId = '', residueIndex, constructId, changes = '' }: Given) {
   const { hasRail } = useLayout();
-  const may = useMay(projectId);
   const make = useMakeMutant(projectId);
   const design = useDesign(projectId);
   const [host, setHost] = useState<Host>('ecoli');
@@ -58,7 +61,7 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
   const place = ['mutant', projectId, proteinId, residueIndex ?? '', constructId ?? '', changes].join(':');
   const draft = useFormDraft(place, form, draftShape);
   useForgetRefusal(form, make);
-  usePresets(projectId, form, { residueIndex, constructId });
+  usePresets(projectId, form, { proteinId, residueIndex, constructId });
   const values = useWatch({ control: form.control });
   const protein = useProtein(projectId, values.proteinId || null).data;
   const construct = useConstructs(projectId).data?.find(({ id }) => id === values.constructId);
@@ -85,25 +88,22 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
     }),
   );
   const busyText = make.isPending ? 'Planning' : design.isPending ? 'Designing primers' : undefined;
-  const button = !may('plan') ? (
-    <Banner kind="note" announce={false}>
-      Planning mutations is for contributors, curators and leads.
-    </Banner>
-  ) : made && !design.isPending ? (
-    <Button kind="primary" full={!hasRail} href={mutantPath(projectId, made.id)}>
-      {`Open ${made.name}`}
-    </Button>
-  ) : (
-    <Button
-      kind="primary"
-      full={!hasRail}
-      busyText={busyText}
-      submit={hasRail}
-      onPress={hasRail ? undefined : () => void submit()}
-    >
-      {values.constructId ? 'Plan and design primers' : 'Plan the mutation'}
-    </Button>
-  );
+  const button =
+    made && !design.isPending ? (
+      <Button kind="primary" full={!hasRail} href={mutantPath(projectId, made.id)}>
+        {`Open ${made.name}`}
+      </Button>
+    ) : (
+      <Button
+        kind="primary"
+        full={!hasRail}
+        busyText={busyText}
+        submit={hasRail}
+        onPress={hasRail ? undefined : () => void submit()}
+      >
+        {values.constructId ? 'Plan and design primers' : 'Plan the mutation'}
+      </Button>
+    );
   return (
     <Screen
       title="Plan a mutation"
@@ -147,7 +147,7 @@ function NewMutant({ projectId, proteinId = '', residueIndex, constructId, chang
 function usePresets(
   projectId: string,
   form: ReturnType<typeof useForm<MutantValues>>,
-  { residueIndex, constructId }: Pick<Given, 'residueIndex' | 'constructId'>,
+  { proteinId, residueIndex, constructId }: Pick<Given, 'proteinId' | 'residueIndex' | 'constructId'>,
 ): void {
   const { setValue, getValues } = form;
   const constructs = useConstructs(projectId).data;
@@ -158,7 +158,7 @@ function usePresets(
     if (construct && getValues('proteinId') === '') setValue('proteinId', construct.proteinId);
   }, [constructs, constructId, getValues, setValue]);
   useEffect(() => {
-    if (protein && residueIndex !== undefined && getValues('changes') === '')
+    if (protein && protein.id === proteinId && residueIndex !== undefined && getValues('changes') === '')
       setValue('changes', beginningOfChange(protein, residueIndex));
-  }, [protein, residueIndex, getValues, setValue]);
+  }, [protein, proteinId, residueIndex, getValues, setValue]);
 }

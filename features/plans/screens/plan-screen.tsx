@@ -26,7 +26,10 @@ function Plan({ projectId }: { projectId: string }) {
   const plan = usePlan(projectId);
   const { hasRail } = useLayout();
   const mutants = plan.data?.mutants ?? [];
-  const actions = <PlanActions projectId={projectId} empty={plan.data?.constructs.length === 0} />;
+  const may = useMay(projectId);
+  const actions = may('plan') ? (
+    <PlanActions projectId={projectId} empty={plan.data?.constructs.length === 0} />
+  ) : undefined;
   return (
     <Screen
       title="Plan"
@@ -56,7 +59,7 @@ function Plan({ projectId }: { projectId: string }) {
             label: 'Constructs and primers',
             content: plan.data ? (
               <Stack gap={20} style={{ maxWidth: 720 }}>
-                <PageTitle quietOnPhone action={hasRail ? <Row wrap>{actions}</Row> : null}>
+                <PageTitle quietOnPhone action={hasRail && actions ? <Row wrap>{actions}</Row> : null}>
                   Plan
                 </PageTitle>
                 <Constructs projectId={projectId} constructs={plan.data.constructs} />
@@ -72,9 +75,7 @@ function Plan({ projectId }: { projectId: string }) {
 
 /** The next step is the primary one: a construct first, then mutations. */
 function PlanActions({ projectId, empty }: { projectId: string; empty: boolean }) {
-  const may = useMay(projectId);
   const { hasRail } = useLayout();
-  if (!may('plan')) return null;
   const icon = hasRail ? Plus : undefined;
   const addConstruct = (
     <Button key="construct" kind={empty ? 'primary' : 'plain'} icon={icon} href={newConstructPath(projectId)}>
