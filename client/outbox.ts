@@ -35,7 +35,7 @@ export interface NewMessage {
   clientKey?: string;
 }
 
-const waits = { firstMilliseconds: 1000, mostMilliseconds: 30_000 };
+const waits = { firstMilliseconds: 500, mostMilliseconds: 8000 };
 const none: QueuedMessage[] = [];
 
 /**

@@ -117,7 +117,7 @@ export class ProjectStream {
   private async rest(failures: number): Promise<void> {
     if (this.tools.pause) return this.tools.pause(failures);
     await this.waiting.wait(
-      backoffMilliseconds(failures, { firstMilliseconds: 500, mostMilliseconds: 20_000 }),
+      backoffMilliseconds(failures, { firstMilliseconds: 500, mostMilliseconds: 8000 }),
     );
   }
 }

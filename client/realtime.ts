@@ -21,7 +21,7 @@ export type UploadHint = { projectId: string; uploadId: string; stage: string; d
 const joinPatienceMilliseconds = 10_000;
 const steadyAfterMilliseconds = 60_000;
 const typingEveryMilliseconds = 2000;
-const waits = { firstMilliseconds: 500, mostMilliseconds: 15_000 };
+const waits = { firstMilliseconds: 500, mostMilliseconds: 8000 };
 
 /** The only socket. It carries facts that are stored and hints that are not; writes go over HTTP. */
 export class Realtime {

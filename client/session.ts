@@ -17,7 +17,8 @@ export interface SessionActs {
   signOut: () => Promise<void>;
 }
 
-const waits = { firstMilliseconds: 1000, mostMilliseconds: 30_000 };
+// Shorter than the time for which the server takes a token whose successor got lost on the way.
+const waits = { firstMilliseconds: 500, mostMilliseconds: 6000 };
 
 export function createSession(access: Access, { call, renewal }: Pick<Api, 'call' | 'renewal'>): SessionActs {
   const pause = new Pause();

@@ -119,7 +119,7 @@ export async function createContainer(env: Env, log: Logger) {
   const pool = new WorkerPool(env.WORKER_MEMORY_MB);
   const upload = { unitOfWork, files, states: uploadStates, pool, onProgress: live.hintProgress.bind(live) };
   const jobs = new JobRunner(
-    new JobQueue(unitOfWork),
+    new JobQueue(unitOfWork, env.JOB_LEASE_SECONDS * 1000),
     {
       [uploads.uploadJobKinds.alignment]: readAlignmentJob({
         ...upload,

@@ -12,6 +12,8 @@ const schema = z.object({
   DEMO_PASSWORD: z.string().min(10).optional(),
   UPLOAD_LIMIT_MB: z.coerce.number().min(1).default(256),
   WORKER_MEMORY_MB: z.coerce.number().min(64).default(400),
+  /** A process that gives no sign for so long has died: its jobs are taken up by another. */
+  JOB_LEASE_SECONDS: z.coerce.number().min(1).default(15),
   /** Extra origins, comma separated, that may open sockets and renew sessions. */
   ALLOWED_ORIGINS: z.string().default(''),
   LOG_LEVEL: z.enum(['silent', 'error', 'warn', 'info', 'debug']).default('info'),

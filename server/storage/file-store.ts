@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { createWriteStream } from 'node:fs';
-import { mkdir, rename, rm } from 'node:fs/promises';
+import { mkdir, readdir, rename, rm, stat } from 'node:fs/promises';
 import path from 'node:path';
 import { Transform, type Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
@@ -13,6 +13,9 @@ export interface ReceivedFile {
   bytes: number;
   temporaryPath: string;
 }
+
+/** No upload writes nothing for so long: such a temporary file was left by a process that died. */
+const leftOverAfterMilliseconds = 60 * 60_000;
 
 /** Files by the hash of their content. Nothing is ever changed in place; what is kept twice is stored once. */
 export class FileStore {
@@ -58,6 +61,20 @@ export class FileStore {
   /** Removes the temporary file, if it still is one. */
   async discard(file: Pick<ReceivedFile, 'temporaryPath'>): Promise<void> {
     await rm(file.temporaryPath, { force: true });
+  }
+
+  /** Removes temporary files that a process left which was killed; gives how many. */
+  async sweep(now = Date.now()): Promise<number> {
+    const names = await readdir(this.incoming).catch(() => []);
+    let swept = 0;
+    for (const name of names) {
+      const file = path.join(this.incoming, name);
+      const found = await stat(file).catch(() => null);
+      if (!found || now - found.mtimeMs < leftOverAfterMilliseconds) continue;
+      await rm(file, { force: true });
+      swept += 1;
+    }
+    return swept;
   }
 
   /** Where the bytes of this hash are; only a row of a project may be the reason to ask. */

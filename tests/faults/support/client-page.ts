@@ -81,14 +81,11 @@ export class ClientPage {
     this.realtime.onJoined.subscribe((_, head) => this.stream.joined(head));
   }
 
-  get session() {
-    return createSession(this.access, this.api);
-  }
-
   /** Takes up the session, reads the project and its threads, and follows it. */
   async open(): Promise<void> {
     const { projectId, subjects } = this.device;
-    await this.session.restore();
+    await createSession(this.access, this.api).restore();
+    if (this.access.person === null) throw new Error('The session is lost.');
     const project = await this.queryClient.fetchQuery({
       queryKey: ['project', projectId],
       queryFn: () => this.api.call(projects.read, { params: { projectId } }),
