@@ -31,13 +31,17 @@ export function Alternatives({ designs, shownId, onShow }: AlternativesProps) {
       <List label="Designs, best first" rows={designs} keyOf={({ id }) => id}>
         {(design) => (
           <ListRow
-            title={`${design.rank}. complementary pair, ${codonsOf(design)}`}
+            title={
+              <span style={{ display: 'flex', justifyContent: 'space-between', gap: 8 }}>
+                {`${design.rank}. complementary pair, ${codonsOf(design)}`}
+                <DesignMark design={design} />
+              </span>
+            }
             detail={reasonsShown(design, design.id === shownId).map((reason) => (
               <span key={reason} style={{ display: 'block' }}>
                 {reason}
               </span>
             ))}
-            end={<DesignMark design={design} />}
             selected={design.id === shownId}
             onPress={() => onShow(design)}
           />

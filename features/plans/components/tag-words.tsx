@@ -7,7 +7,11 @@ const endNames = { N: 'Before the protein', C: 'Behind the protein' } as const;
 export function TagWords({ tags }: { tags: readonly ConstructTag[] }) {
   return (
     <Stack gap={4}>
-      <Caption count={`${tags.length}, not residues of the protein`}>Added residues</Caption>
+      <Caption
+        count={`${tags.reduce((sum, { residues }) => sum + residues.length, 0)}, none of them of the protein`}
+      >
+        Added residues
+      </Caption>
       <KeyValueList label="Added residues">
         {tags.map(({ end, residues, names }) => (
           <KeyValueRow

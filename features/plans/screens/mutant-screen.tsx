@@ -122,7 +122,6 @@ function titleItems(
       value: `bases ${baseRange(codonStart, 3, size)}`,
     })),
     { key: 'numbering', label: 'Numbering', value: numbering },
-    { key: 'scheme', label: 'Scheme', value: 'complementary pair' },
     { key: 'conditions', label: 'Conditions', value: concentrationWords() },
   ];
 }
