@@ -2,15 +2,18 @@ import { useId, useState, type ReactNode } from 'react';
 import type { Annotation } from '@/shared/contracts/annotations';
 import { TextArea } from '@/components/form';
 import { Banner, Button, Card, Row, Stack, Text, Time } from '@/components/ui';
+import type { ApiProblem } from '@/client/problem';
 import type { AnnotationValues } from '../annotation-values';
 import { joinContent } from '../join-content';
 import { Difference } from './difference';
+import { Refusal } from './refusal';
 
 interface ConflictProps {
   base: Annotation;
   mine: AnnotationValues;
   theirs: Annotation;
   isSaving: boolean;
+  problem: ApiProblem | null;
   onSave: (values: AnnotationValues) => void;
   onTakeTheirs: () => void;
 }
@@ -34,7 +37,7 @@ const restOf = ({ kind, confidence, evidence }: Pick<AnnotationValues, 'kind' | 
   `${kind}, confidence ${confidence}, ${evidence.map((one) => `${one.kind} ${one.reference}`.trim()).join('; ') || 'no evidence'}`;
 
 /** Somebody saved while one wrote: both texts with what each changed, and a joined one that can be changed. */
-export function Conflict({ base, mine, theirs, isSaving, onSave, onTakeTheirs }: ConflictProps) {
+export function Conflict({ base, mine, theirs, isSaving, problem, onSave, onTakeTheirs }: ConflictProps) {
   const joined = joinContent(base, mine, theirs);
   const [text, setText] = useState(joined.values.text);
   const differs = restOf(mine) !== restOf(theirs);
@@ -75,6 +78,7 @@ export function Conflict({ base, mine, theirs, isSaving, onSave, onTakeTheirs }:
             : `In ${joined.bothChanged} ${joined.bothChanged === 1 ? 'place' : 'places'} both changed the same words: yours stand before theirs. Read it through.`
         }
       />
+      <Refusal problem={problem} />
       <Row wrap justify="end">
         <Button onPress={onTakeTheirs}>Take theirs</Button>
         <Button onPress={() => onSave(mine)} busyText={busyText}>

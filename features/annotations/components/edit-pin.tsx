@@ -69,6 +69,7 @@ function EditForm({ projectId, annotation, kept, keep, done }: EditFormProps) {
   const edit = useEditAnnotation(projectId);
   // What the text was begun on stays the base while others save.
   const [base] = useState(kept?.base ?? annotation);
+  const [theirs, setTheirs] = useState<Annotation | null>(null);
   const form = useForm<AnnotationValues>({
     resolver: zodResolver(annotationValues),
     defaultValues: kept?.values ?? valuesOf(annotation),
@@ -87,24 +88,33 @@ function EditForm({ projectId, annotation, kept, keep, done }: EditFormProps) {
       { annotationId: annotation.id, version, body: bodyOf(values) },
       {
         onSuccess: done,
-        onError: (error) =>
-          void showFieldErrors(error, ['kind', 'text', 'confidence', 'evidence'], form.setError),
+        onError: (error) => {
+          const other = conflictOf(error, annotationShape);
+          if (other && other.versionNumber > base.versionNumber) setTheirs(other);
+          else showFieldErrors(error, ['kind', 'text', 'confidence', 'evidence'], form.setError);
+        },
       },
     );
-  const theirs =
-    conflictOf(edit.error, annotationShape) ?? (annotation.version > base.version ? annotation : null);
-  if (theirs && edit.error?.status === 412)
+  if (theirs)
     return (
       <Conflict
+        key={theirs.versionNumber}
         base={base}
         mine={form.getValues()}
         theirs={theirs}
         isSaving={edit.isPending}
-        onSave={(values) => save(values, theirs.version)}
+        problem={edit.error?.status === 412 ? null : edit.error}
+        onSave={(values) => {
+          // Kept as the draft too, should this one not arrive either.
+          form.reset(values);
+          save(values, theirs.version);
+        }}
         onTakeTheirs={done}
       />
     );
-  const submit = form.handleSubmit((values) => save(values, base.version));
+  // Somebody who only accepted or contested it left the text as it was begun on.
+  const version = annotation.versionNumber === base.versionNumber ? annotation.version : base.version;
+  const submit = form.handleSubmit((values) => save(values, version));
   return (
     <form onSubmit={(event) => void submit(event)} noValidate>
       <Stack gap={14}>
