@@ -11,6 +11,7 @@
  *   SequenceGrid letters[{ code, number, href }] label        (rows of ten with a ruler; arrows walk)
  *   ChemistryCue chemistry                                   IndexMark lineHeightPixels? tone?
  *   spokenResidue, shortLabel, wordsForCode                  words without a picture
+ *   plateWords   the words of a Plate for a residue of the contract: <Plate {...plateWords(residue)} />
  */
 export { Plate, type PlateProps } from './plate';
 export type { PlateSize } from './plate-style';
@@ -26,6 +27,7 @@ export { ChemistryCue } from './chemistry-cue';
 export { IndexMark } from './index-mark';
 export {
   evidenceWords,
+  plateWords,
   shortLabel,
   spokenResidue,
   wordsForCode,

@@ -1,3 +1,4 @@
+import type { ResidueLabel } from '@/shared/contracts/common';
 import { aminoAcidWords, type AminoAcidWords } from './amino-acid-words.data';
 
 export type EvidenceEdge = 'observed' | 'equivalence' | 'predicted';
@@ -23,6 +24,11 @@ export interface ResidueWords {
   evidence?: EvidenceEdge;
   grade?: GradeName;
   struck?: boolean;
+}
+
+/** The words of a plate for a residue as the server names it. */
+export function plateWords({ family, part, letter, label, numbering, organism }: ResidueLabel) {
+  return { family, part, code: letter, number: label, numbering, organism };
 }
 
 export function wordsForCode(code: string): AminoAcidWords {

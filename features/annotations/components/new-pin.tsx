@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import { Controller, useForm } from 'react-hook-form';
 import Pin from 'lucide-react-native/icons/pin';
 import type { ResidueLabel } from '@/shared/contracts/common';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { Banner, Button, Row, Stack, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { useFormDraft } from '@/client/use-form-draft';
@@ -72,15 +72,7 @@ function NewPinForm({ projectId, residue, onClose, partnerField }: NewPinProps) 
     <form onSubmit={(event) => void submit(event)} noValidate>
       <Stack gap={14}>
         <Row gap={8} wrap>
-          <Plate
-            size={32}
-            family={residue.family}
-            part={residue.part}
-            code={residue.letter}
-            number={residue.label}
-            numbering={residue.numbering}
-            organism={residue.organism}
-          />
+          <Plate size={32} {...plateWords(residue)} />
           <Text kind="small" tone="soft">
             {`${residue.numbering} numbering, `}
             <em>{residue.organism}</em>. It holds for all copies.

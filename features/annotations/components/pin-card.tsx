@@ -1,7 +1,7 @@
 import type { ReactElement } from 'react';
 import type { AnnotationAtResidue } from '@/shared/contracts/annotations';
 import type { ResidueLabel, ResidueRef } from '@/shared/contracts/common';
-import { Evidence, Grade, Plate, type EvidenceEdge } from '@/components/residue';
+import { Evidence, Grade, Plate, plateWords, type EvidenceEdge } from '@/components/residue';
 import { color, face } from '@/components/theme';
 import { Link, Markdown, Row, Status, Text, Time, type Linkify } from '@/components/ui';
 import { residuePath } from '@/client/paths';
@@ -102,16 +102,5 @@ interface ResiduePlateProps {
 }
 
 function ResiduePlate({ projectId, residue, evidence }: ResiduePlateProps) {
-  return (
-    <Plate
-      family={residue.family}
-      part={residue.part}
-      code={residue.letter}
-      number={residue.label}
-      numbering={residue.numbering}
-      organism={residue.organism}
-      evidence={evidence}
-      href={residuePath(projectId, residue)}
-    />
-  );
+  return <Plate {...plateWords(residue)} evidence={evidence} href={residuePath(projectId, residue)} />;
 }

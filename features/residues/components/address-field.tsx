@@ -2,7 +2,7 @@ import { useState } from 'react';
 import X from 'lucide-react-native/icons/x';
 import type { ResidueLabel } from '@/shared/contracts/common';
 import { TextInput } from '@/components/form';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { IconButton, List, ListRow, Row, Stack, Text } from '@/components/ui';
 import { useLocate } from '../use-residues';
 
@@ -13,17 +13,7 @@ interface AddressFieldProps {
   onChange: (next: ResidueLabel | null) => void;
 }
 
-const plateOf = (residue: ResidueLabel) => (
-  <Plate
-    size={32}
-    family={residue.family}
-    part={residue.part}
-    code={residue.letter}
-    number={residue.label}
-    numbering={residue.numbering}
-    organism={residue.organism}
-  />
-);
+const plateOf = (residue: ResidueLabel) => <Plate size={32} {...plateWords(residue)} />;
 
 /** A residue named by its address: typed, read by the locator, and taken by hand from what it can mean. */
 export function AddressField({ projectId, label, value, onChange }: AddressFieldProps) {

@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import ArrowRight from 'lucide-react-native/icons/arrow-right';
 import type { Passport } from '@/shared/contracts/residues';
-import { Grade, Plate } from '@/components/residue';
+import { Grade, Plate, plateWords } from '@/components/residue';
 import { face } from '@/components/theme';
 import { Button, Caption, Empty, Stack, Table, Text, type TableColumn } from '@/components/ui';
 import { alignmentPath } from '@/client/paths';
@@ -26,18 +26,7 @@ function columnsOf(projectId: string, { residue }: Passport): TableColumn<Column
       rowHeader: true,
       cell: (row) => {
         if (row.kind === 'gap') return <span style={{ fontFamily: face.mono }}>gap</span>;
-        if (row.kind === 'own')
-          return (
-            <Plate
-              family={residue.family}
-              part={residue.part}
-              code={residue.letter}
-              number={residue.label}
-              numbering={residue.numbering}
-              organism={residue.organism}
-              selected
-            />
-          );
+        if (row.kind === 'own') return <Plate {...plateWords(residue)} selected />;
         return (
           <ResiduePlate
             projectId={projectId}

@@ -1,7 +1,7 @@
 import PencilRuler from 'lucide-react-native/icons/pencil-ruler';
 import type { ResidueLabel } from '@/shared/contracts/common';
 import type { Mutant } from '@/shared/contracts/plans';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { Button, Caption, Empty, List, ListRow, ReadView } from '@/components/ui';
 import { mutantPath, newMutantPath } from '@/client/paths';
 import { useMutants } from '@/features/plans';
@@ -67,18 +67,7 @@ function MutantRow({ projectId, residue, mutant }: MutantsSectionProps & { mutan
   return (
     <ListRow
       href={mutantPath(projectId, mutant.id)}
-      lead={
-        <Plate
-          size={32}
-          family={residue.family}
-          part={residue.part}
-          code={residue.letter}
-          number={residue.label}
-          becomes={here?.newResidues}
-          numbering={residue.numbering}
-          organism={residue.organism}
-        />
-      }
+      lead={<Plate size={32} {...plateWords(residue)} becomes={here?.newResidues} />}
       title={mutant.state}
       detail={[
         mutant.name,

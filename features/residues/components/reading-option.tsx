@@ -1,6 +1,6 @@
 import type { CSSProperties, HTMLAttributes } from 'react';
 import type { Reading } from '@/shared/contracts/residues';
-import { Plate, wordsForCode } from '@/components/residue';
+import { Plate, plateWords, wordsForCode } from '@/components/residue';
 import { color, face } from '@/components/theme';
 import { Mark } from '@/components/ui';
 
@@ -36,16 +36,7 @@ export function ReadingOption({ reading, highlighted, option }: ReadingOptionPro
     : reason;
   return (
     <div {...option} style={frame(highlighted)}>
-      <Plate
-        size={32}
-        family={residue.family}
-        part={residue.part}
-        code={residue.letter}
-        number={residue.label}
-        becomes={mutationTo ?? undefined}
-        numbering={residue.numbering}
-        organism={residue.organism}
-      />
+      <Plate size={32} {...plateWords(residue)} becomes={mutationTo ?? undefined} />
       <div style={{ minWidth: 0 }}>
         <div>
           <b>{capital(wordsForCode(residue.letter).name)}</b>{' '}

@@ -4,7 +4,7 @@ import ChevronLeft from 'lucide-react-native/icons/chevron-left';
 import ChevronRight from 'lucide-react-native/icons/chevron-right';
 import type { ResidueLabel } from '@/shared/contracts/common';
 import type { Passport } from '@/shared/contracts/residues';
-import { BigPlate, ChainScale, spokenResidue } from '@/components/residue';
+import { BigPlate, ChainScale, plateWords, spokenResidue } from '@/components/residue';
 import { IconButton, Row, Stack } from '@/components/ui';
 import { residuePath } from '@/client/paths';
 import { passportQuery } from '../use-residues';
@@ -34,14 +34,7 @@ export function ResidueHead({ projectId, passport }: { projectId: string; passpo
   usePrefetched(projectId, previous, next);
   return (
     <Stack gap={12}>
-      <BigPlate
-        family={residue.family}
-        part={residue.part}
-        code={residue.letter}
-        number={residue.label}
-        numbering={residue.numbering}
-        organism={residue.organism}
-      />
+      <BigPlate {...plateWords(residue)} />
       <Row gap={4} align="start">
         <Step projectId={projectId} to={previous} word="Previous" />
         <div style={{ flex: 1, minWidth: 0 }}>

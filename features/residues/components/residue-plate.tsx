@@ -1,5 +1,5 @@
 import type { ResidueLabel } from '@/shared/contracts/common';
-import { Plate, type EvidenceEdge, type GradeName, type PlateSize } from '@/components/residue';
+import { Plate, plateWords, type EvidenceEdge, type GradeName, type PlateSize } from '@/components/residue';
 import { residuePath } from '@/client/paths';
 
 interface ResiduePlateProps {
@@ -13,16 +13,5 @@ interface ResiduePlateProps {
 
 /** A residue's plate that leads to its page. */
 export function ResiduePlate({ projectId, residue, ...rest }: ResiduePlateProps) {
-  return (
-    <Plate
-      {...rest}
-      family={residue.family}
-      part={residue.part}
-      code={residue.letter}
-      number={residue.label}
-      numbering={residue.numbering}
-      organism={residue.organism}
-      href={residuePath(projectId, residue)}
-    />
-  );
+  return <Plate {...rest} {...plateWords(residue)} href={residuePath(projectId, residue)} />;
 }

@@ -1,7 +1,7 @@
 import ArrowRight from 'lucide-react-native/icons/arrow-right';
 import type { Subject } from '@/shared/contracts/threads';
 import { PageTitle } from '@/components/layout';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { Button, Row } from '@/components/ui';
 import { subjectPath, subjectWords } from '../subject-of-key';
 import type { SubjectThread } from '../apply-thread-event';
@@ -20,17 +20,7 @@ export function ThreadHeading({ projectId, subject, thread }: ThreadHeadingProps
     <div style={{ paddingBottom: 8 }}>
       <Row gap={12} wrap justify="between">
         <Row gap={12} wrap style={{ flexShrink: 1 }}>
-          {residue ? (
-            <Plate
-              size={32}
-              family={residue.family}
-              part={residue.part}
-              code={residue.letter}
-              number={residue.label}
-              numbering={residue.numbering}
-              organism={residue.organism}
-            />
-          ) : null}
+          {residue ? <Plate size={32} {...plateWords(residue)} /> : null}
           <PageTitle quietOnPhone>{caption}</PageTitle>
         </Row>
         {href ? (

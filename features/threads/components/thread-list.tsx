@@ -1,5 +1,5 @@
 import type { Thread } from '@/shared/contracts/threads';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { Banner, Button, Empty, List, ListRow, Loading, Stack, Time } from '@/components/ui';
 import { threadPath } from '@/client/paths';
 import { useThreads } from '../use-threads';
@@ -26,19 +26,7 @@ function Row({ projectId, thread, selected }: { projectId: string; thread: Threa
     <ListRow
       href={threadPath(projectId, thread.subject)}
       selected={selected}
-      lead={
-        residue ? (
-          <Plate
-            size={32}
-            family={residue.family}
-            part={residue.part}
-            code={residue.letter}
-            number={residue.label}
-            numbering={residue.numbering}
-            organism={residue.organism}
-          />
-        ) : undefined
-      }
+      lead={residue ? <Plate size={32} {...plateWords(residue)} /> : undefined}
       title={thread.caption}
       detail={
         <>
