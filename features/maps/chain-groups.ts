@@ -26,10 +26,12 @@ export function standingOf({ status, readiness }: Pick<ChainMap, 'status' | 'rea
 /** What must be equal for two chains to be one row. */
 function sameness(chain: ChainMap): string {
   const { kind, readiness, familyId, proteinId, identity, coverage, reason, segments } = chain;
+  // Where nothing is near, what is seen of the chain has to be alike: other lengths are other sequences.
+  const unmatched = [reason, chain.observedLength, chain.declaredLength, chain.firstLabel, chain.lastLabel];
   const exceptions = chain.exceptions.map((one) => [one.kind, one.label, one.chainLetter, one.residueIndex]);
   const standing = standingOf(chain);
   const alike = { kind, standing, readiness, familyId, proteinId, identity, coverage, segments, exceptions };
-  return JSON.stringify({ ...alike, reason: proteinId ? '' : reason });
+  return JSON.stringify({ ...alike, unmatched: proteinId ? null : unmatched });
 }
 
 /** Groups in the order in which they need a person; within that in the order of the file. */
