@@ -1,14 +1,15 @@
 /*
- * What is filled in. Each part brings its label, hint and error, and takes a Controller's field as it is:
- *   <Controller control={control} name="email"
- *     render={({ field, fieldState }) => <TextInput label="E-mail" {...field} error={fieldState.error?.message} />} />
- * All but FileDrop: label hint? error? labelEnd? quietLabel? value onChange(value) onBlur? name? ref?
+ * What is filled in. Each part brings its label, hint and error.
  *   TextInput   type? inputMode? placeholder? autoComplete? autoFocus? maxLength? mono? required? readOnly?
  *   TextArea    rows? placeholder? maxLength? mono? required? readOnly? onKeyDown?
  *   Select      options[{ value, label, off? }] placeholder? required?
  *   Checkbox    label hint? value: boolean onChange(value)
  *   FileDrop    title hint? action? accept? onFile(file) error? busyText? offReason? buttonKind? more?
- *   Field       children(ids): for a control of one's own; spread the ids on it
+ * All but FileDrop: label hint? error? labelEnd? quietLabel? value onChange(value) onBlur? name? ref?
+ * In a form they are bound to a field, which gives value, onChange and error:
+ *   <BoundText control={control} name="email" label="E-mail" required />
+ *   BoundText, BoundArea, BoundSelect, BoundCheckbox, BoundChoice; wrongWords? (instead of the schema's) emptyIsNone?
+ *   Form        onSubmit() gap?
  */
 export { Field, type ControlIds, type FieldProps, type FieldWords } from './field';
 export { TextInput, type TextInputProps } from './text-input';
@@ -16,3 +17,5 @@ export { TextArea, type TextAreaProps } from './text-area';
 export { Select, type SelectOption, type SelectProps } from './select';
 export { Checkbox, type CheckboxProps } from './checkbox';
 export { FileDrop, type FileDropProps } from './file-drop';
+export { BoundArea, BoundCheckbox, BoundChoice, BoundSelect, BoundText } from './bound';
+export { Form } from './form';

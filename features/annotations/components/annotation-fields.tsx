@@ -1,6 +1,6 @@
 import { Controller, type Control } from 'react-hook-form';
 import { annotationKinds, confidences } from '@/shared/contracts/annotations';
-import { Select, TextArea } from '@/components/form';
+import { BoundArea, BoundSelect } from '@/components/form';
 import { Segment, Stack, Text } from '@/components/ui';
 import type { AnnotationValues } from '../annotation-values';
 import { EvidenceFields } from './evidence-fields';
@@ -12,26 +12,14 @@ const sureness = confidences.map((confidence) => ({ value: confidence, label: co
 export function AnnotationFields({ control }: { control: Control<AnnotationValues> }) {
   return (
     <>
-      <Controller
-        control={control}
-        name="kind"
-        render={({ field, fieldState }) => (
-          <Select label="Kind" options={kinds} {...field} error={fieldState.error?.message} />
-        )}
-      />
-      <Controller
+      <BoundSelect control={control} name="kind" label="Kind" options={kinds} />
+      <BoundArea
         control={control}
         name="text"
-        render={({ field, fieldState }) => (
-          <TextArea
-            label="What is known"
-            hint="Markdown; residue names such as cE59 become links."
-            rows={4}
-            required
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="What is known"
+        hint="Markdown; residue names such as cE59 become links."
+        rows={4}
+        required
       />
       <EvidenceFields control={control} />
       <Controller

@@ -2,7 +2,8 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useEffect, useRef, useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { annotation as annotationShape, type Annotation } from '@/shared/contracts/annotations';
-import { Button, Loading, Row, Stack } from '@/components/ui';
+import { Form } from '@/components/form';
+import { Button, Loading, Row } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { conflictOf } from '@/client/problem';
 import { useDraft } from '@/client/use-draft';
@@ -116,19 +117,17 @@ function EditForm({ projectId, annotation, kept, keep, done }: EditFormProps) {
   const version = annotation.versionNumber === base.versionNumber ? annotation.version : base.version;
   const submit = form.handleSubmit((values) => save(values, version));
   return (
-    <form onSubmit={(event) => void submit(event)} noValidate>
-      <Stack gap={14}>
-        <AnnotationFields control={form.control} />
-        <Refusal problem={edit.error} />
-        <Row justify="between" wrap>
-          <Button kind="quiet" onPress={done}>
-            Drop the changes
-          </Button>
-          <Button kind="primary" submit busyText={edit.isPending ? 'Saving' : undefined}>
-            Save
-          </Button>
-        </Row>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void submit()} gap={14}>
+      <AnnotationFields control={form.control} />
+      <Refusal problem={edit.error} />
+      <Row justify="between" wrap>
+        <Button kind="quiet" onPress={done}>
+          Drop the changes
+        </Button>
+        <Button kind="primary" submit busyText={edit.isPending ? 'Saving' : undefined}>
+          Save
+        </Button>
+      </Row>
+    </Form>
   );
 }

@@ -1,8 +1,8 @@
-import { Controller, useFieldArray, type Control } from 'react-hook-form';
+import { useFieldArray, type Control } from 'react-hook-form';
 import Plus from 'lucide-react-native/icons/plus';
 import X from 'lucide-react-native/icons/x';
 import { evidenceKinds } from '@/shared/contracts/annotations';
-import { Select, TextInput } from '@/components/form';
+import { BoundSelect, BoundText } from '@/components/form';
 import { Button, IconButton, Text } from '@/components/ui';
 import type { AnnotationValues } from '../annotation-values';
 
@@ -30,25 +30,19 @@ export function EvidenceFields({ control }: { control: Control<AnnotationValues>
             alignItems: 'start',
           }}
         >
-          <Controller
+          <BoundSelect
             control={control}
             name={`evidence.${place}.kind`}
-            render={({ field: kind }) => (
-              <Select label={`Kind of evidence ${place + 1}`} quietLabel options={options} {...kind} />
-            )}
+            label={`Kind of evidence ${place + 1}`}
+            quietLabel
+            options={options}
           />
-          <Controller
+          <BoundText
             control={control}
             name={`evidence.${place}.reference`}
-            render={({ field: reference, fieldState }) => (
-              <TextInput
-                label={`Where evidence ${place + 1} is found`}
-                quietLabel
-                placeholder="model, figure, DOI"
-                {...reference}
-                error={fieldState.error?.message}
-              />
-            )}
+            label={`Where evidence ${place + 1} is found`}
+            quietLabel
+            placeholder="model, figure, DOI"
           />
           <IconButton icon={X} label={`Remove evidence ${place + 1}`} onPress={() => remove(place)} />
         </div>

@@ -3,8 +3,9 @@ import type { ReactNode } from 'react';
 import { Controller, useForm } from 'react-hook-form';
 import Pin from 'lucide-react-native/icons/pin';
 import type { ResidueLabel } from '@/shared/contracts/common';
+import { Form } from '@/components/form';
 import { Plate, plateWords } from '@/components/residue';
-import { Banner, Button, Row, Stack, Text } from '@/components/ui';
+import { Banner, Button, Row, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { useFormDraft } from '@/client/use-form-draft';
 import {
@@ -69,36 +70,34 @@ function NewPinForm({ projectId, residue, onClose, partnerField }: NewPinProps) 
     );
   });
   return (
-    <form onSubmit={(event) => void submit(event)} noValidate>
-      <Stack gap={14}>
-        <Row gap={8} wrap>
-          <Plate size={32} {...plateWords(residue)} />
-          <Text kind="small" tone="soft">
-            {`${residue.numbering} numbering, `}
-            <em>{residue.organism}</em>. It holds for all copies.
-          </Text>
-        </Row>
-        {draft.elsewhere ? (
-          <Banner kind="warn" action={<Button onPress={draft.takeElsewhere}>Take it</Button>}>
-            Another tab holds a different draft for this residue.
-          </Banner>
-        ) : null}
-        <AnnotationFields control={form.control} />
-        <Controller
-          control={form.control}
-          name="partner"
-          render={({ field }) => <>{partnerField({ value: field.value, onChange: field.onChange })}</>}
-        />
-        <Refusal problem={make.error} />
-        <Row justify="between" wrap>
-          <Button kind="quiet" onPress={onClose}>
-            Later, keep the draft
-          </Button>
-          <Button kind="primary" icon={Pin} submit busyText={make.isPending ? 'Pinning' : undefined}>
-            Pin
-          </Button>
-        </Row>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void submit()} gap={14}>
+      <Row gap={8} wrap>
+        <Plate size={32} {...plateWords(residue)} />
+        <Text kind="small" tone="soft">
+          {`${residue.numbering} numbering, `}
+          <em>{residue.organism}</em>. It holds for all copies.
+        </Text>
+      </Row>
+      {draft.elsewhere ? (
+        <Banner kind="warn" action={<Button onPress={draft.takeElsewhere}>Take it</Button>}>
+          Another tab holds a different draft for this residue.
+        </Banner>
+      ) : null}
+      <AnnotationFields control={form.control} />
+      <Controller
+        control={form.control}
+        name="partner"
+        render={({ field }) => <>{partnerField({ value: field.value, onChange: field.onChange })}</>}
+      />
+      <Refusal problem={make.error} />
+      <Row justify="between" wrap>
+        <Button kind="quiet" onPress={onClose}>
+          Later, keep the draft
+        </Button>
+        <Button kind="primary" icon={Pin} submit busyText={make.isPending ? 'Pinning' : undefined}>
+          Pin
+        </Button>
+      </Row>
+    </Form>
   );
 }

@@ -1,10 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { useId } from 'react';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import { z } from 'zod';
 import type { Annotation, AnnotationStatus } from '@/shared/contracts/annotations';
-import { TextArea } from '@/components/form';
-import { Button, Row, Stack, Text } from '@/components/ui';
+import { BoundArea, Form } from '@/components/form';
+import { Button, Row, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { useSetAnnotationStatus } from '../use-annotations';
 import { FormFrame } from './form-frame';
@@ -56,7 +55,6 @@ interface ReasonFormProps extends ReasonDialogProps {
 }
 
 function ReasonForm({ projectId, annotation, to, said, onClose }: ReasonFormProps) {
-  const id = useId();
   const set = useSetAnnotationStatus(projectId);
   const { control, handleSubmit, setError } = useForm<ReasonValues>({
     resolver: zodResolver(reasonValues),
@@ -69,28 +67,20 @@ function ReasonForm({ projectId, annotation, to, said, onClose }: ReasonFormProp
     ),
   );
   return (
-    <form id={id} onSubmit={(event) => void submit(event)} noValidate>
-      <Stack>
-        <Text kind="small" tone="soft">
-          {said.sentence}
-        </Text>
-        <Controller
-          control={control}
-          name="reason"
-          render={({ field, fieldState }) => (
-            <TextArea label="Reason" rows={3} required {...field} error={fieldState.error?.message} />
-          )}
-        />
-        <Refusal problem={set.error} />
-        <Row justify="end" wrap>
-          <Button kind="quiet" onPress={onClose}>
-            Leave it
-          </Button>
-          <Button kind="danger" submit busyText={set.isPending ? 'Saving' : undefined}>
-            {said.verb}
-          </Button>
-        </Row>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void submit()} gap={12}>
+      <Text kind="small" tone="soft">
+        {said.sentence}
+      </Text>
+      <BoundArea control={control} name="reason" label="Reason" rows={3} required />
+      <Refusal problem={set.error} />
+      <Row justify="end" wrap>
+        <Button kind="quiet" onPress={onClose}>
+          Leave it
+        </Button>
+        <Button kind="danger" submit busyText={set.isPending ? 'Saving' : undefined}>
+          {said.verb}
+        </Button>
+      </Row>
+    </Form>
   );
 }

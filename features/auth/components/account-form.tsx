@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Form } from '@/components/form';
 import { EntryFrame } from '@/components/layout';
 import { useLayout } from '@/components/theme';
 import { Banner, Link, Row, Stack, Text } from '@/components/ui';
@@ -35,15 +36,7 @@ export function AccountForm(props: AccountFormProps) {
             {problem.message}
           </Banner>
         ) : null}
-        <form
-          noValidate
-          onSubmit={(event) => {
-            event.preventDefault();
-            onSubmit();
-          }}
-        >
-          <Stack gap={16}>{children}</Stack>
-        </form>
+        <Form onSubmit={onSubmit}>{children}</Form>
         <Row justify="between">
           <Text>{other.question}</Text>
           <Link href={other.href}>{other.label}</Link>

@@ -1,8 +1,8 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { signInBody } from '@/shared/contracts/auth';
-import { TextInput } from '@/components/form';
+import { BoundText } from '@/components/form';
 import { Button } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { signUpPath } from '@/client/paths';
@@ -39,33 +39,21 @@ export function SignInScreen() {
       problem={signIn.error}
       other={{ question: 'New here?', label: 'Make an account', href: signUpPath(back) }}
     >
-      <Controller
+      <BoundText
         control={control}
         name="email"
-        render={({ field, fieldState }) => (
-          <TextInput
-            label="E-mail"
-            type="email"
-            autoComplete="username"
-            required
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="E-mail"
+        type="email"
+        autoComplete="username"
+        required
       />
-      <Controller
+      <BoundText
         control={control}
         name="password"
-        render={({ field, fieldState }) => (
-          <TextInput
-            label="Password"
-            type="password"
-            autoComplete="current-password"
-            required
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="Password"
+        type="password"
+        autoComplete="current-password"
+        required
       />
       <Button kind="primary" submit full busyText={signIn.isPending ? 'Signing in' : undefined}>
         Sign in

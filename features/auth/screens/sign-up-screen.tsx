@@ -1,8 +1,8 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { signUpBody } from '@/shared/contracts/auth';
-import { TextInput } from '@/components/form';
+import { BoundText } from '@/components/form';
 import { Button } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { signInPath } from '@/client/paths';
@@ -43,14 +43,7 @@ export function SignUpScreen() {
       other={{ question: 'You have an account?', label: 'Sign in', href: signInPath(back) }}
     >
       {fields.map(({ name, ...words }) => (
-        <Controller
-          key={name}
-          control={control}
-          name={name}
-          render={({ field, fieldState }) => (
-            <TextInput {...words} required {...field} error={fieldState.error?.message} />
-          )}
-        />
+        <BoundText key={name} control={control} name={name} {...words} required />
       ))}
       <Button kind="primary" submit full busyText={signUp.isPending ? 'Making the account' : undefined}>
         Make the account

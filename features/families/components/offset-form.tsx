@@ -1,9 +1,9 @@
 import { useEffect, useState } from 'react';
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import { protein as proteinSchema, type Numbering, type Protein } from '@/shared/contracts/families';
-import { Checkbox, TextInput } from '@/components/form';
-import { Banner, BothTexts, Button, Segment, Stack, Text } from '@/components/ui';
+import { BoundCheckbox, BoundText, Form, TextInput } from '@/components/form';
+import { Banner, BothTexts, Button, Segment, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { conflictOf } from '@/client/problem';
 import {
@@ -69,134 +69,104 @@ export function OffsetForm({ projectId, protein, numbering }: OffsetFormProps) {
     )();
   const busyText = act.isPending ? 'Saving' : undefined;
   return (
-    <form
-      noValidate
-      onSubmit={(event) => {
-        event.preventDefault();
-        save(base);
-      }}
-    >
-      <Stack gap={16}>
-        {act.error && !theirs ? <Banner kind="danger">{act.error.message}</Banner> : null}
-        {act.isSuccess && !isDirty ? (
-          <Banner kind="good">{`Saved. Every screen shows ${values.name} numbers where it is preferred.`}</Banner>
-        ) : null}
-        <Controller
-          control={control}
-          name="name"
-          render={({ field, fieldState }) => (
-            <TextInput
-              label="Name"
-              hint="Shown beside every number: mature, precursor."
-              required
-              {...field}
-              error={fieldState.error?.message}
-            />
-          )}
+    <Form onSubmit={() => save(base)}>
+      {act.error && !theirs ? <Banner kind="danger">{act.error.message}</Banner> : null}
+      {act.isSuccess && !isDirty ? (
+        <Banner kind="good">{`Saved. Every screen shows ${values.name} numbers where it is preferred.`}</Banner>
+      ) : null}
+      <BoundText
+        control={control}
+        name="name"
+        label="Name"
+        hint="Shown beside every number: mature, precursor."
+        required
+      />
+      <Segment
+        label="How it is given"
+        options={ways}
+        value={values.way}
+        onChange={(way) => {
+          const next = way === 'offset' ? 'offset' : 'one';
+          setValue('number', toldAs(next, values), { shouldDirty: true });
+          setValue('way', next);
+        }}
+      />
+      <BoundText
+        control={control}
+        name="number"
+        label={
+          values.way === 'one'
+            ? 'Number 1 is this residue of the sequence'
+            : 'Added to the place in the sequence'
+        }
+        hint={
+          values.way === 'one'
+            ? 'The first residue of the mature chain, counted in the uploaded row without gaps.'
+            : 'Minus 50 makes residue 51 number 1.'
+        }
+        mono
+        required
+      />
+      <TextInput
+        label="Try it on one more residue of the sequence"
+        mono
+        inputMode="numeric"
+        value={asked}
+        onChange={setAsked}
+      />
+      {offset === null ? (
+        <Text tone="soft">Write a number to see what becomes of the residues.</Text>
+      ) : (
+        <OffsetPreviewTable
+          protein={protein}
+          rule={{ offset, skipZero: values.skipZero }}
+          askedPlace={/^\d+$/.test(asked.trim()) ? Number(asked) : null}
+          name={values.name}
         />
-        <Segment
-          label="How it is given"
-          options={ways}
-          value={values.way}
-          onChange={(way) => {
-            const next = way === 'offset' ? 'offset' : 'one';
-            setValue('number', toldAs(next, values), { shouldDirty: true });
-            setValue('way', next);
+      )}
+      <BoundCheckbox
+        control={control}
+        name="skipZero"
+        label="There is no residue 0"
+        hint="As some older papers count: minus 1, then 1."
+      />
+      <BoundCheckbox
+        control={control}
+        name="preferred"
+        label="Show this numbering first"
+        hint="For everybody, on every protein of this family that has one of this name."
+      />
+      {theirs ? (
+        <BothTexts
+          sentence="Somebody changed this protein meanwhile."
+          rows={[
+            {
+              key: 'rule',
+              name: values.name,
+              theirs: storedRule(theirs, values.name),
+              mine: ruleWords(bodyOf(values)),
+            },
+            {
+              key: 'organism',
+              name: 'Organism',
+              theirs: theirs.organism,
+              mine: protein.organism,
+            },
+          ]}
+          onTakeTheirs={() => {
+            const there = theirs.numberings.find(({ name }) => name === values.name);
+            act.reset();
+            setBase(theirs.version);
+            reset(valuesOf(theirs, there));
           }}
+          onKeepMine={() => save(theirs.version)}
+          busyText={busyText}
         />
-        <Controller
-          control={control}
-          name="number"
-          render={({ field, fieldState }) => (
-            <TextInput
-              label={
-                values.way === 'one'
-                  ? 'Number 1 is this residue of the sequence'
-                  : 'Added to the place in the sequence'
-              }
-              hint={
-                values.way === 'one'
-                  ? 'The first residue of the mature chain, counted in the uploaded row without gaps.'
-                  : 'Minus 50 makes residue 51 number 1.'
-              }
-              mono
-              required
-              {...field}
-              error={fieldState.error?.message}
-            />
-          )}
-        />
-        <TextInput
-          label="Try it on one more residue of the sequence"
-          mono
-          inputMode="numeric"
-          value={asked}
-          onChange={setAsked}
-        />
-        {offset === null ? (
-          <Text tone="soft">Write a number to see what becomes of the residues.</Text>
-        ) : (
-          <OffsetPreviewTable
-            protein={protein}
-            rule={{ offset, skipZero: values.skipZero }}
-            askedPlace={/^\d+$/.test(asked.trim()) ? Number(asked) : null}
-            name={values.name}
-          />
-        )}
-        <Controller
-          control={control}
-          name="skipZero"
-          render={({ field }) => (
-            <Checkbox
-              label="There is no residue 0"
-              hint="As some older papers count: minus 1, then 1."
-              {...field}
-            />
-          )}
-        />
-        <Controller
-          control={control}
-          name="preferred"
-          render={({ field }) => (
-            <Checkbox
-              label="Show this numbering first"
-              hint="For everybody, on every protein of this family that has one of this name."
-              {...field}
-            />
-          )}
-        />
-        {theirs ? (
-          <BothTexts
-            sentence="Somebody changed this protein meanwhile."
-            rows={[
-              {
-                key: 'rule',
-                name: values.name,
-                theirs: storedRule(theirs, values.name),
-                mine: ruleWords(bodyOf(values)),
-              },
-              {
-                key: 'organism',
-                name: 'Organism',
-                theirs: theirs.organism,
-                mine: protein.organism,
-              },
-            ]}
-            onTakeTheirs={() => {
-              const there = theirs.numberings.find(({ name }) => name === values.name);
-              act.reset();
-              setBase(theirs.version);
-              reset(valuesOf(theirs, there));
-            }}
-            onKeepMine={() => save(theirs.version)}
-            busyText={busyText}
-          />
-        ) : (
-          <Button kind="primary" submit full busyText={busyText}>
-            Save the numbering
-          </Button>
-        )}
-      </Stack>
-    </form>
+      ) : (
+        <Button kind="primary" submit full busyText={busyText}>
+          Save the numbering
+        </Button>
+      )}
+    </Form>
   );
 }

@@ -1,9 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { families, protein as proteinSchema, type Protein } from '@/shared/contracts/families';
-import { TextInput } from '@/components/form';
-import { Banner, BothTexts, Button, Dialog, Stack } from '@/components/ui';
+import { BoundText, Form } from '@/components/form';
+import { Banner, BothTexts, Button, Dialog } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { conflictOf } from '@/client/problem';
 import { useRenameProtein } from '../use-families';
@@ -38,46 +38,32 @@ export function RenameProtein({ projectId, protein, onClose }: RenameProteinProp
   const busyText = rename.isPending ? 'Saving' : undefined;
   return (
     <Dialog open title="Rename the organism" onClose={onClose}>
-      <form
-        noValidate
-        onSubmit={(event) => {
-          event.preventDefault();
-          save(protein.version);
-        }}
-      >
-        <Stack gap={16}>
-          {rename.error && !theirs ? <Banner kind="danger">{rename.error.message}</Banner> : null}
-          <Controller
-            control={control}
-            name="organism"
-            render={({ field, fieldState }) => (
-              <TextInput
-                label="Organism"
-                hint="The residues stay as they are; only the name changes, everywhere."
-                required
-                {...field}
-                error={fieldState.error?.message}
-              />
-            )}
+      <Form onSubmit={() => save(protein.version)}>
+        {rename.error && !theirs ? <Banner kind="danger">{rename.error.message}</Banner> : null}
+        <BoundText
+          control={control}
+          name="organism"
+          label="Organism"
+          hint="The residues stay as they are; only the name changes, everywhere."
+          required
+        />
+        {theirs ? (
+          <BothTexts
+            sentence="Somebody changed this protein meanwhile."
+            rows={[{ key: 'name', name: 'Organism', theirs: theirs.organism, mine: getValues('organism') }]}
+            onTakeTheirs={onClose}
+            onKeepMine={() => save(theirs.version)}
+            busyText={busyText}
           />
-          {theirs ? (
-            <BothTexts
-              sentence="Somebody changed this protein meanwhile."
-              rows={[{ key: 'name', name: 'Organism', theirs: theirs.organism, mine: getValues('organism') }]}
-              onTakeTheirs={onClose}
-              onKeepMine={() => save(theirs.version)}
-              busyText={busyText}
-            />
-          ) : (
-            <div style={{ display: 'flex', flexWrap: 'wrap', gap: 8, justifyContent: 'flex-end' }}>
-              <Button onPress={onClose}>Keep the old name</Button>
-              <Button kind="primary" submit busyText={busyText}>
-                Rename
-              </Button>
-            </div>
-          )}
-        </Stack>
-      </form>
+        ) : (
+          <div style={{ display: 'flex', flexWrap: 'wrap', gap: 8, justifyContent: 'flex-end' }}>
+            <Button onPress={onClose}>Keep the old name</Button>
+            <Button kind="primary" submit busyText={busyText}>
+              Rename
+            </Button>
+          </div>
+        )}
+      </Form>
     </Dialog>
   );
 }

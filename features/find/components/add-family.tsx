@@ -1,10 +1,10 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import { z } from 'zod';
 import { familyName, part } from '@/shared/contracts/families';
-import { Checkbox, Select, TextInput } from '@/components/form';
+import { BoundCheckbox, BoundSelect, BoundText, Form } from '@/components/form';
 import { partWords } from '@/components/residue';
-import { Banner, Button, Sheet, Stack } from '@/components/ui';
+import { Banner, Button, Sheet } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { useMakeFamily } from '@/features/families';
 
@@ -46,72 +46,36 @@ export function AddFamily({ projectId, open, onClose }: AddFamilyProps) {
   );
   return (
     <Sheet open={open} title="Add a family" onClose={close}>
-      <form
-        noValidate
-        onSubmit={(event) => {
-          event.preventDefault();
-          void submit();
-        }}
-      >
-        <Stack gap={16}>
-          {make.error && !make.error.problem.fields ? (
-            <Banner kind="danger">{make.error.message}</Banner>
-          ) : null}
-          <Controller
-            control={control}
-            name="name"
-            render={({ field, fieldState }) => (
-              <TextInput
-                label="Name"
-                hint="As it is written before a residue: c, γ, OSCP."
-                mono
-                required
-                {...field}
-                error={fieldState.error?.message}
-              />
-            )}
-          />
-          <Controller
-            control={control}
-            name="aliases"
-            render={({ field, fieldState }) => (
-              <TextInput
-                label="Other spellings"
-                hint="What the locator takes too, with spaces between: gamma"
-                mono
-                {...field}
-                error={fieldState.error?.message}
-              />
-            )}
-          />
-          <Controller
-            control={control}
-            name="part"
-            render={({ field, fieldState }) => (
-              <Select
-                label="Part of the motor"
-                options={partOptions}
-                {...field}
-                error={fieldState.error?.message}
-              />
-            )}
-          />
-          <Controller
-            control={control}
-            name="catalytic"
-            render={({ field }) => (
-              <Checkbox
-                label="Its copies are catalytic"
-                hint="They take turns in three states: open, loose, tight."
-                {...field}
-              />
-            )}
-          />
-          <Button kind="primary" submit full busyText={make.isPending ? 'Adding the family' : undefined}>
-            Add the family
-          </Button>
-        </Stack>
-      </form>
+      <Form onSubmit={() => void submit()}>
+        {make.error && !make.error.problem.fields ? (
+          <Banner kind="danger">{make.error.message}</Banner>
+        ) : null}
+        <BoundText
+          control={control}
+          name="name"
+          label="Name"
+          hint="As it is written before a residue: c, γ, OSCP."
+          mono
+          required
+        />
+        <BoundText
+          control={control}
+          name="aliases"
+          label="Other spellings"
+          hint="What the locator takes too, with spaces between: gamma"
+          mono
+        />
+        <BoundSelect control={control} name="part" label="Part of the motor" options={partOptions} />
+        <BoundCheckbox
+          control={control}
+          name="catalytic"
+          label="Its copies are catalytic"
+          hint="They take turns in three states: open, loose, tight."
+        />
+        <Button kind="primary" submit full busyText={make.isPending ? 'Adding the family' : undefined}>
+          Add the family
+        </Button>
+      </Form>
     </Sheet>
   );
 }

@@ -1,10 +1,10 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import { mapDecisionBody } from '@/shared/contracts/maps';
 import type { Family } from '@/shared/contracts/families';
-import { Select } from '@/components/form';
-import { Button, Stack } from '@/components/ui';
+import { BoundSelect, Form, Select } from '@/components/form';
+import { Button } from '@/components/ui';
 import { familyOptions, useProteins } from '@/features/families';
 import type { MapDecision } from '../use-decide-chains';
 
@@ -31,40 +31,33 @@ export function AnotherProteinForm(props: AnotherProteinFormProps) {
   });
   const filled = families.filter(({ proteinCount }) => proteinCount > 0);
   return (
-    <form noValidate onSubmit={(event) => void handleSubmit((decision) => onDecide(decision))(event)}>
-      <Stack gap={12}>
-        <Select
-          label="Family"
-          placeholder="Choose a family"
-          hint={filled.length === 0 ? 'No family has a protein yet: an alignment brings them.' : undefined}
-          options={familyOptions(filled)}
-          value={familyId}
-          onChange={(next) => {
-            setFamilyId(next);
-            setValue('proteinId', '');
-          }}
-        />
-        <Controller
-          control={control}
-          name="proteinId"
-          render={({ field, fieldState }) => (
-            <Select
-              {...field}
-              label="Protein"
-              placeholder={familyId ? 'Choose a protein' : 'Choose the family first'}
-              options={(proteins.data ?? []).map(({ id, organism, length }) => ({
-                value: id,
-                label: `${organism} · ${length} residues`,
-              }))}
-              error={fieldState.error ? 'Choose the protein this chain is.' : undefined}
-              required
-            />
-          )}
-        />
-        <Button kind={isPrimary ? 'primary' : 'plain'} submit full busyText={busyText}>
-          Map to this protein
-        </Button>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void handleSubmit((decision) => onDecide(decision))()} gap={12}>
+      <Select
+        label="Family"
+        placeholder="Choose a family"
+        hint={filled.length === 0 ? 'No family has a protein yet: an alignment brings them.' : undefined}
+        options={familyOptions(filled)}
+        value={familyId}
+        onChange={(next) => {
+          setFamilyId(next);
+          setValue('proteinId', '');
+        }}
+      />
+      <BoundSelect
+        control={control}
+        name="proteinId"
+        label="Protein"
+        placeholder={familyId ? 'Choose a protein' : 'Choose the family first'}
+        options={(proteins.data ?? []).map(({ id, organism, length }) => ({
+          value: id,
+          label: `${organism} · ${length} residues`,
+        }))}
+        wrongWords="Choose the protein this chain is."
+        required
+      />
+      <Button kind={isPrimary ? 'primary' : 'plain'} submit full busyText={busyText}>
+        Map to this protein
+      </Button>
+    </Form>
   );
 }

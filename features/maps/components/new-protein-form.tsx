@@ -1,9 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import { mapDecisionBody } from '@/shared/contracts/maps';
 import type { Family } from '@/shared/contracts/families';
-import { Select, TextInput } from '@/components/form';
-import { Button, Stack } from '@/components/ui';
+import { BoundSelect, BoundText, Form } from '@/components/form';
+import { Button } from '@/components/ui';
 import { familyOptions } from '@/features/families';
 import type { MapDecision } from '../use-decide-chains';
 
@@ -29,39 +29,26 @@ export function NewProteinForm({ families, familyId, isPrimary, busyText, onDeci
     defaultValues: { decision: 'add protein', familyId: familyId ?? '', organism: '' },
   });
   return (
-    <form noValidate onSubmit={(event) => void handleSubmit((decision) => onDecide(decision))(event)}>
-      <Stack gap={12}>
-        <Controller
-          control={control}
-          name="familyId"
-          render={({ field, fieldState }) => (
-            <Select
-              {...field}
-              label="Family"
-              placeholder="Choose a family"
-              options={familyOptions(families)}
-              error={fieldState.error ? 'Choose the family it belongs to.' : undefined}
-              required
-            />
-          )}
-        />
-        <Controller
-          control={control}
-          name="organism"
-          render={({ field, fieldState }) => (
-            <TextInput
-              {...field}
-              label="Organism"
-              hint="Whose protein it is; can be changed later."
-              error={fieldState.error?.message}
-              required
-            />
-          )}
-        />
-        <Button kind={isPrimary ? 'primary' : 'plain'} submit full busyText={busyText}>
-          Add the protein
-        </Button>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void handleSubmit((decision) => onDecide(decision))()} gap={12}>
+      <BoundSelect
+        control={control}
+        name="familyId"
+        label="Family"
+        placeholder="Choose a family"
+        options={familyOptions(families)}
+        wrongWords="Choose the family it belongs to."
+        required
+      />
+      <BoundText
+        control={control}
+        name="organism"
+        label="Organism"
+        hint="Whose protein it is; can be changed later."
+        required
+      />
+      <Button kind={isPrimary ? 'primary' : 'plain'} submit full busyText={busyText}>
+        Add the protein
+      </Button>
+    </Form>
   );
 }

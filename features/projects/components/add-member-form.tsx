@@ -1,9 +1,9 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { addMemberBody } from '@/shared/contracts/projects';
-import { TextInput } from '@/components/form';
-import { Banner, Button, Choice, Stack } from '@/components/ui';
+import { BoundChoice, BoundText, Form } from '@/components/form';
+import { Banner, Button } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { roleConsequence } from '../role-words';
 import { roles } from '@/shared/permissions';
@@ -37,44 +37,24 @@ export function AddMemberForm({ projectId, readersMayComment, onAdded }: AddMemb
     consequence: roleConsequence(role, readersMayComment),
   }));
   return (
-    <form
-      noValidate
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
-    >
-      <Stack gap={16}>
-        {add.error ? <Banner kind="danger">{add.error.message}</Banner> : null}
-        {add.data && !add.error ? (
-          <Banner kind="good">{`${add.data.name} is a member now, as ${add.data.role}.`}</Banner>
-        ) : null}
-        <Controller
-          control={control}
-          name="email"
-          render={({ field, fieldState }) => (
-            <TextInput
-              label="E-mail"
-              hint="Of somebody who has an account here."
-              type="email"
-              autoComplete="off"
-              required
-              {...field}
-              error={fieldState.error?.message}
-            />
-          )}
-        />
-        <Controller
-          control={control}
-          name="role"
-          render={({ field }) => (
-            <Choice label="Role" options={options} value={field.value} onChange={field.onChange} />
-          )}
-        />
-        <Button kind="primary" submit full busyText={add.isPending ? 'Adding' : undefined}>
-          Add to the project
-        </Button>
-      </Stack>
-    </form>
+    <Form onSubmit={() => void submit()}>
+      {add.error ? <Banner kind="danger">{add.error.message}</Banner> : null}
+      {add.data && !add.error ? (
+        <Banner kind="good">{`${add.data.name} is a member now, as ${add.data.role}.`}</Banner>
+      ) : null}
+      <BoundText
+        control={control}
+        name="email"
+        label="E-mail"
+        hint="Of somebody who has an account here."
+        type="email"
+        autoComplete="off"
+        required
+      />
+      <BoundChoice control={control} name="role" label="Role" options={options} />
+      <Button kind="primary" submit full busyText={add.isPending ? 'Adding' : undefined}>
+        Add to the project
+      </Button>
+    </Form>
   );
 }

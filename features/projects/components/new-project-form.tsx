@@ -1,10 +1,10 @@
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { OwnProject } from '@/shared/contracts/projects';
 import type { Team } from '@/shared/contracts/teams';
 import { motorKind } from '@/shared/contracts/projects';
-import { Select, TextInput } from '@/components/form';
-import { Banner, Button, Choice, Stack, Text } from '@/components/ui';
+import { BoundChoice, BoundSelect, BoundText, Form } from '@/components/form';
+import { Banner, Button, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { motorWords } from '../motor-words.data';
 import { newProjectForm, newTeam, useNewProject, type NewProject } from '../use-new-project';
@@ -36,67 +36,33 @@ export function NewProjectForm({ teams, onMade }: NewProjectFormProps) {
     { value: newTeam, label: 'A new team' },
   ];
   return (
-    <form
-      noValidate
-      onSubmit={(event) => {
-        event.preventDefault();
-        void submit();
-      }}
-    >
-      <Stack gap={16}>
-        {problem ? <Banner kind="danger">{problem.message}</Banner> : null}
-        {teams.length > 0 ? (
-          <Controller
-            control={control}
-            name="team"
-            render={({ field, fieldState }) => (
-              <Select label="Team" options={options} {...field} error={fieldState.error?.message} />
-            )}
-          />
-        ) : null}
-        {watch('team') === newTeam ? (
-          <Controller
-            control={control}
-            name="teamName"
-            render={({ field, fieldState }) => (
-              <TextInput
-                label="Name of the team"
-                hint="The people you work with; you lead it."
-                required
-                {...field}
-                error={fieldState.error?.message}
-              />
-            )}
-          />
-        ) : null}
-        <Controller
+    <Form onSubmit={() => void submit()}>
+      {problem ? <Banner kind="danger">{problem.message}</Banner> : null}
+      {teams.length > 0 ? <BoundSelect control={control} name="team" label="Team" options={options} /> : null}
+      {watch('team') === newTeam ? (
+        <BoundText
           control={control}
-          name="name"
-          render={({ field, fieldState }) => (
-            <TextInput
-              label="Name of the project"
-              hint="One line of work, with members of its own."
-              required
-              {...field}
-              error={fieldState.error?.message}
-            />
-          )}
+          name="teamName"
+          label="Name of the team"
+          hint="The people you work with; you lead it."
+          required
         />
-        <Text kind="small" strong>
-          Kind of motor
-        </Text>
-        <Controller
-          control={control}
-          name="motorKind"
-          render={({ field }) => (
-            <Choice label="Kind of motor" options={motors} value={field.value} onChange={field.onChange} />
-          )}
-        />
-        <Text tone="soft">Families can be added later. You are the first lead of the project.</Text>
-        <Button kind="primary" submit full busyText={isMaking ? 'Making the project' : undefined}>
-          Make the project
-        </Button>
-      </Stack>
-    </form>
+      ) : null}
+      <BoundText
+        control={control}
+        name="name"
+        label="Name of the project"
+        hint="One line of work, with members of its own."
+        required
+      />
+      <Text kind="small" strong>
+        Kind of motor
+      </Text>
+      <BoundChoice control={control} name="motorKind" label="Kind of motor" options={motors} />
+      <Text tone="soft">Families can be added later. You are the first lead of the project.</Text>
+      <Button kind="primary" submit full busyText={isMaking ? 'Making the project' : undefined}>
+        Make the project
+      </Button>
+    </Form>
   );
 }

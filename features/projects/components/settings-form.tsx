@@ -1,10 +1,10 @@
 import { useEffect, useState } from 'react';
 import { zodResolver } from '@hookform/resolvers/zod';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { project as projectSchema, projectSettingsBody, type Project } from '@/shared/contracts/projects';
-import { Checkbox, TextInput } from '@/components/form';
-import { Banner, BothTexts, Button, Row, Stack } from '@/components/ui';
+import { BoundCheckbox, BoundText, Form } from '@/components/form';
+import { Banner, BothTexts, Button, Row } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { conflictOf } from '@/client/problem';
 import { useChangeProject } from '../use-projects';
@@ -45,61 +45,42 @@ export function SettingsForm({ project }: { project: Project }) {
   const mine = getValues();
   const busyText = change.isPending ? 'Saving' : undefined;
   return (
-    <form
-      noValidate
-      onSubmit={(event) => {
-        event.preventDefault();
-        void handleSubmit(send(base.version))();
-      }}
-    >
-      <Stack gap={16}>
-        {change.error && !theirs ? <Banner kind="danger">{change.error.message}</Banner> : null}
-        {change.isSuccess && !isDirty ? <Banner kind="good">Saved.</Banner> : null}
-        <Controller
-          control={control}
-          name="name"
-          render={({ field, fieldState }) => (
-            <TextInput label="Name of the project" required {...field} error={fieldState.error?.message} />
-          )}
+    <Form onSubmit={() => void handleSubmit(send(base.version))()}>
+      {change.error && !theirs ? <Banner kind="danger">{change.error.message}</Banner> : null}
+      {change.isSuccess && !isDirty ? <Banner kind="good">Saved.</Banner> : null}
+      <BoundText control={control} name="name" label="Name of the project" required />
+      <BoundCheckbox
+        control={control}
+        name="readersMayComment"
+        label="Readers may comment"
+        hint="They then write in threads; everything else stays read only for them."
+      />
+      {theirs ? (
+        <BothTexts
+          sentence="Somebody changed these settings meanwhile."
+          rows={[
+            { key: 'name', name: 'Name', theirs: theirs.name, mine: mine.name },
+            {
+              key: 'comment',
+              name: 'Readers',
+              theirs: commentWords(theirs.readersMayComment),
+              mine: commentWords(mine.readersMayComment),
+            },
+          ]}
+          onTakeTheirs={() => {
+            change.reset();
+            startFrom(theirs);
+          }}
+          onKeepMine={() => void handleSubmit(send(theirs.version))()}
+          busyText={busyText}
         />
-        <Controller
-          control={control}
-          name="readersMayComment"
-          render={({ field }) => (
-            <Checkbox
-              label="Readers may comment"
-              hint="They then write in threads; everything else stays read only for them."
-              {...field}
-            />
-          )}
-        />
-        {theirs ? (
-          <BothTexts
-            sentence="Somebody changed these settings meanwhile."
-            rows={[
-              { key: 'name', name: 'Name', theirs: theirs.name, mine: mine.name },
-              {
-                key: 'comment',
-                name: 'Readers',
-                theirs: commentWords(theirs.readersMayComment),
-                mine: commentWords(mine.readersMayComment),
-              },
-            ]}
-            onTakeTheirs={() => {
-              change.reset();
-              startFrom(theirs);
-            }}
-            onKeepMine={() => void handleSubmit(send(theirs.version))()}
-            busyText={busyText}
-          />
-        ) : (
-          <Row>
-            <Button kind="primary" submit busyText={busyText}>
-              Save the settings
-            </Button>
-          </Row>
-        )}
-      </Stack>
-    </form>
+      ) : (
+        <Row>
+          <Button kind="primary" submit busyText={busyText}>
+            Save the settings
+          </Button>
+        </Row>
+      )}
+    </Form>
   );
 }

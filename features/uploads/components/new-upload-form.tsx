@@ -1,10 +1,10 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useRouter } from 'expo-router';
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
+import { useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import { newUploadBody, type Upload } from '@/shared/contracts/uploads';
-import { FileDrop, Select, TextInput } from '@/components/form';
+import { BoundSelect, BoundText, FileDrop } from '@/components/form';
 import { Banner, Button, ReadView, Stack } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { uploadPath } from '@/client/paths';
@@ -54,39 +54,25 @@ export function NewUploadForm({ projectId, kind, familyId }: NewUploadFormProps)
       {kind === 'alignment' ? (
         <ReadView of={families} what="the families">
           {(list) => (
-            <Controller
+            <BoundSelect
               control={control}
               name="familyId"
-              render={({ field, fieldState }) => (
-                <Select
-                  {...field}
-                  label="Family"
-                  hint="The kind of subunit that all its rows are."
-                  placeholder="Choose a family"
-                  options={familyOptions(list)}
-                  value={field.value ?? ''}
-                  onChange={(value) => field.onChange(value || undefined)}
-                  error={fieldState.error?.message}
-                  required
-                />
-              )}
+              label="Family"
+              hint="The kind of subunit that all its rows are."
+              placeholder="Choose a family"
+              options={familyOptions(list)}
+              emptyIsNone
+              required
             />
           )}
         </ReadView>
       ) : null}
-      <Controller
+      <BoundText
         control={control}
         name="name"
-        render={({ field, fieldState }) => (
-          <TextInput
-            {...field}
-            label="Name"
-            hint="Left empty, it is called as the file."
-            value={field.value ?? ''}
-            onChange={(value) => field.onChange(value || undefined)}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="Name"
+        hint="Left empty, it is called as the file."
+        emptyIsNone
       />
       <FileDrop
         title={limits.title}
