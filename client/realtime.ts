@@ -1,4 +1,4 @@
-import { io, type Socket } from 'socket.io-client';
+import type { io as openSocket, Socket } from 'socket.io-client';
 import { projectEvent, type ProjectEvent } from '@/shared/contracts/projects';
 import { uploadProgress } from '@/shared/contracts/uploads';
 import {
@@ -34,6 +34,8 @@ export class Realtime {
   readonly onUploadHint = new Emitter<[UploadHint]>();
   readonly onConnection = new Emitter<[]>();
   private socket: Socket<ServerToClient, ClientToServer> | null = null;
+  /** From start to stop; another start is another run. */
+  private run: object | null = null;
   private state: Connection = 'off';
   private readonly joined = new Map<string, number>();
   private readonly lastTyped = new Map<string, number>();
@@ -50,7 +52,25 @@ export class Realtime {
   readonly connection = (): Connection => this.state;
 
   start(): void {
-    if (this.socket) return;
+    if (this.run) return;
+    const run = {};
+    this.run = run;
+    this.become('connecting');
+    void this.fetchAndConnect(run);
+  }
+
+  /** The socket's own code comes after the sign-in, so that no page waits for it. */
+  private async fetchAndConnect(run: object): Promise<void> {
+    for (let failures = 0; this.run === run; failures += 1) {
+      const code = await import('socket.io-client').catch(() => null);
+      if (this.run !== run) return;
+      if (code) return this.connect(code.io);
+      this.become('away');
+      await this.pause.wait(backoffMilliseconds(failures, waits));
+    }
+  }
+
+  private connect(io: typeof openSocket): void {
     const options = {
       // Asked at each connect: the token of now, not of then.
       auth: (give: (data: object) => void) => give({ token: this.access.token }),
@@ -65,7 +85,6 @@ export class Realtime {
       ? io(this.address, options)
       : io(options);
     this.socket = socket;
-    this.become('connecting');
     socket.on('connect', () => {
       this.connectedAt = Date.now();
       this.become('connected');
@@ -89,6 +108,7 @@ export class Realtime {
   stop(): void {
     const socket = this.socket;
     this.socket = null;
+    this.run = null;
     this.pause.wake();
     socket?.disconnect();
     this.people.clear();

@@ -85,6 +85,20 @@ test('joins a project once connected and tells how far it is', async () => {
   expect(line.connection()).toBe('connected');
 });
 
+test('stopped before the code of the socket is here, it connects no more; started anew, it connects once', async () => {
+  line.start();
+  line.stop();
+  await new Promise((done) => setTimeout(done, 50));
+  expect([line.connection(), station.tokens]).toEqual(['off', []]);
+  line.start();
+  line.stop();
+  line.start();
+  line.start();
+  await until(() => line.connection() === 'connected');
+  await new Promise((done) => setTimeout(done, 50));
+  expect(station.tokens).toEqual(['t1']);
+});
+
 test('cut by the server it renews the token, connects with the new one and joins again', async () => {
   const heads: number[] = [];
   line.onJoined.subscribe((_project, head) => heads.push(head));
