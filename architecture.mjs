@@ -155,6 +155,14 @@ export const rooms = [
     node: true,
     advice: "Scripts run before anything is installed: use Node's own modules.",
   },
+  {
+    // What the bundler puts in the place of parts that the client leaves out (metro.left-out.cjs).
+    room: 'stand-ins',
+    mayImport: [],
+    packages: ['react'],
+    node: false,
+    advice: 'A stand-in takes the place of a part of a package: it leans on nothing of ours.',
+  },
   { room: 'tests', mayImport: ['**'], packages: { not: [] }, node: true, advice: '' },
   { room: 'bench', mayImport: ['**'], packages: { not: [] }, node: true, advice: '' },
 ];

@@ -179,6 +179,14 @@ const table: Record<string, Row> = {
     ],
     allowed: ["import { x } from './lib/places.mjs';", "import { spawn } from 'node:child_process';"],
   },
+  'stand-ins': {
+    file: 'stand-ins/planted.tsx',
+    forbidden: [
+      ["import { color } from '@/components/theme';", /leans on nothing of ours/],
+      ["import { View } from 'react-native';", /may not import the package react-native/],
+    ],
+    allowed: ["import { Fragment } from 'react';", "import { Navigator } from './left-out';"],
+  },
   tests: { file: 'tests/planted.ts', forbidden: [frontDoor], allowed: ["import { x } from '@/server/app';"] },
   bench: { file: 'bench/planted.ts', forbidden: [frontDoor], allowed: ["import { x } from '@/app/index';"] },
 };
