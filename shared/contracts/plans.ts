@@ -215,7 +215,7 @@ export const plans = {
 
 export const planEvents = { 'construct.changed': construct, 'mutant.changed': mutant };
 
-/** Handbook 13: stands on every primer list, order and export. */
-export const primerCaution =
-  'Check the design before you order. Follow your institution’s rules on biosafety and recombinant DNA; this tool does not replace review by a qualified person.';
-export const calculatedCaution = 'Calculated for the stated concentrations; real reactions differ.';
+export {
+  FIGURES_CAUTION as calculatedCaution,
+  PRIMER_CAUTION as primerCaution,
+} from '../sequence/primers/caution';

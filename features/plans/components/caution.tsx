@@ -1,11 +1,11 @@
 import { Banner } from '@/components/ui';
-import { calculatedCaution, primerCaution } from '@/shared/contracts/plans';
+import { FIGURES_CAUTION, PRIMER_CAUTION } from '@/shared/sequence/primers/caution';
 
 /** Stands wherever primers are listed, chosen or exported. */
 export function Caution() {
   return (
     <Banner kind="warn" announce={false}>
-      {primerCaution} {calculatedCaution}
+      {PRIMER_CAUTION} {FIGURES_CAUTION}
     </Banner>
   );
 }

@@ -1,5 +1,6 @@
 import { stringify } from 'csv-stringify/sync';
-import { calculatedCaution, primerCaution, type Mutant } from '../../../shared/contracts';
+import type { Mutant } from '../../../shared/contracts';
+import { FIGURES_CAUTION, PRIMER_CAUTION } from '../../../shared/sequence/primers/caution';
 
 const columns = [
   'primer',
@@ -45,7 +46,7 @@ export function primerListCsv(mutants: readonly Mutant[], projectName: string, a
       design.withinLimits ? 'within limits' : 'a limit is missed: see the checks',
     ]);
   });
-  const caution = `${primerCaution} ${calculatedCaution}`;
+  const caution = `${PRIMER_CAUTION} ${FIGURES_CAUTION}`;
   const rows = [[caution], [`Project ${projectName}, ${at.toISOString()}`], columns, ...lines, [caution]];
   // A spreadsheet must not run what a person typed: cells that begin like a formula are made text.
   return stringify(rows, { bom: true, escape_formulas: true, record_delimiter: 'windows' });

@@ -306,7 +306,7 @@ describe('the primer list', () => {
     const { body: designed } = await design(planned);
     const lines = await read();
     const caution =
-      'Check the design before you order. Follow your institution’s rules on biosafety and recombinant DNA; this tool does not replace review by a qualified person.';
+      "Check the design before you order. Follow your institution's rules on biosafety and recombinant DNA; this tool does not replace review by a qualified person.";
     for (const line of [lines[0], lines.at(-1)]) {
       expect(line).toContain(caution);
       expect(line).toContain('Calculated for the stated concentrations; real reactions differ.');
