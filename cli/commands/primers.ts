@@ -1,12 +1,9 @@
 import { HOSTS } from '@/shared/sequence/construct/codon-choice';
 import { readCoding } from '@/shared/sequence/construct/coding';
 import { parseMutations, type MutantRequest } from '@/shared/sequence/construct/mutation';
-import {
-  checkMutant,
-  offsetNumbering,
-  type NumberingLookup,
-} from '@/shared/sequence/construct/mutation-check';
+import { checkMutant } from '@/shared/sequence/construct/mutation-check';
 import { readDna } from '@/shared/sequence/construct/read-dna';
+import { offsetNumbering, type Numbering } from '@/shared/sequence/numbering/numbering';
 import { hasErrors, type Issue } from '@/shared/sequence/parse-result';
 import { FIGURES_CAUTION, PRIMER_CAUTION } from '@/shared/sequence/primers/caution';
 import {
@@ -48,7 +45,7 @@ function printed(design: Design): object {
 function answer(
   asked: string,
   construct: PrimerConstruct,
-  numbering: NumberingLookup,
+  numbering: Numbering,
   scheme: SchemeName | 'all',
   settings: PairSettings,
 ): MutationAnswer {

@@ -34,10 +34,7 @@ export function viewChange(text: string, protein: Protein): ChangeView {
     const message = 'Plan one mutant at a time; changes made together are joined by +, like E62Q+R41K.';
     return { ...nothing, issues: [{ code: 'several-mutants', severity: 'error', message }] };
   }
-  const { value, issues, suggestions } = checkMutant(request, protein.residues, {
-    indexOf: (label) => residueOfLabel(numbering, label),
-    labelOf: (index) => labelOfResidue(numbering, index),
-  });
+  const { value, issues, suggestions } = checkMutant(request, protein.residues, numbering);
   return { changes: value?.changes ?? [], issues, suggestions, unfinished: null };
 }
 

@@ -3,7 +3,6 @@ import type { z } from 'zod';
 import type { designBody, Mutant as MutantContract, newMutantBody } from '../../../shared/contracts';
 import { checkMutant } from '../../../shared/sequence/construct/mutation-check';
 import { parseMutations } from '../../../shared/sequence/construct/mutation';
-import { labelOfResidue, residueOfLabel } from '../../../shared/sequence/numbering/numbering';
 import type { Unit, UnitOfWork } from '../../db';
 import { sha256 } from '../../lib/hash';
 import { newId } from '../../lib/new-id';
@@ -180,10 +179,7 @@ export class MutantService {
         issues: parsed.issues,
       });
     }
-    const checked = checkMutant(request, protein.residues, {
-      indexOf: (label) => residueOfLabel(preferred, label),
-      labelOf: (index) => labelOfResidue(preferred, index),
-    });
+    const checked = checkMutant(request, protein.residues, preferred);
     if (!checked.value) {
       throw refuse(checked.issues.map((issue) => issue.message).join(' '), { issues: checked.issues });
     }

@@ -1,25 +1,8 @@
 import { codeOfLetter } from '../alphabet';
+import { labelOfResidue, residueOfLabel, type Numbering } from '../numbering/numbering';
 import type { Issue, ParseResult } from '../parse-result';
 import { residueIndex, type ResidueIndex } from '../positions';
 import type { MutantRequest, Substitution } from './mutation';
-
-/** How a protein's residues are called. A label may be absent, never double. */
-export interface NumberingLookup {
-  indexOf(label: string): ResidueIndex | null;
-  labelOf(index: ResidueIndex): string | null;
-}
-
-/** Numbering with a constant offset: label = index from 1 + offset. Only labels inside the protein are known. */
-export function offsetNumbering(length: number, offset = 0): NumberingLookup {
-  return {
-    indexOf: (label) => {
-      if (!/^-?\d+$/.test(label)) return null;
-      const index = Number(label) - offset - 1;
-      return index >= 0 && index < length ? residueIndex(index) : null;
-    },
-    labelOf: (index) => (index >= 0 && index < length ? String(index + 1 + offset) : null),
-  };
-}
 
 export interface ResidueChange {
   residueIndex: ResidueIndex;
@@ -54,11 +37,13 @@ function wrongLetter(
   substitution: Substitution,
   protein: string,
   place: ResidueIndex,
-  numbering: NumberingLookup,
+  numbering: Numbering,
 ): { issue: Issue; suggestions: string[] } {
   const { from, to, label, short } = substitution;
   const stands = protein.charAt(place);
-  const labels = near(protein, place, from).flatMap((index) => numbering.labelOf(residueIndex(index)) ?? []);
+  const labels = near(protein, place, from).flatMap(
+    (index) => labelOfResidue(numbering, residueIndex(index)) ?? [],
+  );
   const wanted = `${codeOfLetter(from)} (${from})`;
   const where =
     labels.length > 0
@@ -79,20 +64,16 @@ function wrongLetter(
  * Holds a mutant against a protein in a numbering. Errors: `mutation-label-unknown`, `mutation-letter-differs` (what stands there
  * and where the letter stands near). Warning: `mutation-start-codon` (the first residue).
  */
-export function checkMutant(
-  request: MutantRequest,
-  protein: string,
-  numbering: NumberingLookup,
-): MutantCheck {
+export function checkMutant(request: MutantRequest, protein: string, numbering: Numbering): MutantCheck {
   const issues: Issue[] = [];
   const suggestions: string[] = [];
   const changes: ResidueChange[] = [];
   for (const substitution of request.substitutions) {
     const { from, to, label, short } = substitution;
-    const index = numbering.indexOf(label);
+    const index = residueOfLabel(numbering, label);
     if (index === null) {
-      const first = numbering.labelOf(residueIndex(0));
-      const last = numbering.labelOf(residueIndex(protein.length - 1));
+      const first = labelOfResidue(numbering, residueIndex(0));
+      const last = labelOfResidue(numbering, residueIndex(protein.length - 1));
       const range = first !== null && last !== null ? ` It runs from ${first} to ${last}.` : '';
       issues.push({
         code: 'mutation-label-unknown',

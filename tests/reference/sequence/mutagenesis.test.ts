@@ -1,6 +1,7 @@
 import { complement } from '@/shared/sequence/construct/bases';
 import { readCoding, type Coding } from '@/shared/sequence/construct/coding';
-import { checkMutant, offsetNumbering } from '@/shared/sequence/construct/mutation-check';
+import { checkMutant } from '@/shared/sequence/construct/mutation-check';
+import { sequenceNumbering } from '@/shared/sequence/numbering/numbering';
 import { parseMutations } from '@/shared/sequence/construct/mutation';
 import { readDnaRecords } from '@/shared/sequence/construct/read-dna';
 import { designComplementaryPair } from '@/shared/sequence/primers/complementary-pair';
@@ -52,7 +53,7 @@ function codingOf(bases: string, start: number, circular = true): Coding {
 function changesOf(mutation: string, coding: Coding): CodingChange[] {
   const [request] = parseMutations(mutation).value ?? [];
   const checked = request
-    ? checkMutant(request, coding.protein, offsetNumbering(coding.protein.length)).value
+    ? checkMutant(request, coding.protein, sequenceNumbering(coding.protein.length)).value
     : null;
   const placed = checked ? placeChanges(checked, coding).value : null;
   if (placed === null) throw new Error(`${mutation} cannot be placed`);

@@ -1,10 +1,7 @@
 import fc from 'fast-check';
-import {
-  checkMutant,
-  offsetNumbering,
-  type NumberingLookup,
-} from '@/shared/sequence/construct/mutation-check';
+import { checkMutant } from '@/shared/sequence/construct/mutation-check';
 import { parseMutations } from '@/shared/sequence/construct/mutation';
+import { offsetNumbering, sequenceNumbering, type Numbering } from '@/shared/sequence/numbering/numbering';
 import { residueIndex } from '@/shared/sequence/positions';
 
 const codes = (text: string) => parseMutations(text).issues.map(({ code }) => code);
@@ -82,7 +79,7 @@ test('any text gives mutants or an error, never an exception', () => {
 describe('held against a protein', () => {
   //               1234567890
   const PROTEIN = 'MAGDLLEIPM';
-  const check = (text: string, numbering: NumberingLookup = offsetNumbering(PROTEIN.length)) => {
+  const check = (text: string, numbering: Numbering = sequenceNumbering(PROTEIN.length)) => {
     const [request] = parseMutations(text).value ?? [];
     if (!request) throw new Error(`${text} cannot be read`);
     return checkMutant(request, PROTEIN, numbering);
@@ -114,14 +111,13 @@ describe('held against a protein', () => {
     expect(check('E11Q').issues[0]).toMatchObject({ code: 'mutation-label-unknown', residue: '11' });
     expect(check('E11Q').issues[0]?.message).toContain('from 1 to 10');
     expect(check('E0Q').issues[0]?.code).toBe('mutation-label-unknown');
-    const silent: NumberingLookup = { indexOf: () => null, labelOf: () => null };
+    const silent: Numbering = { segments: [] };
     expect(check('E7Q', silent).issues[0]?.code).toBe('mutation-label-unknown');
   });
 
   test('labels come from the numbering alone', () => {
-    const lettered: NumberingLookup = {
-      indexOf: (label) => (label === '52A' ? residueIndex(6) : null),
-      labelOf: (index) => (index === 6 ? '52A' : null),
+    const lettered: Numbering = {
+      segments: [{ residueIndex: residueIndex(6), length: 1, firstNumber: 52, suffix: 'A' }],
     };
     expect(check('E52AQ', lettered).value?.changes[0]).toMatchObject({ residueIndex: 6, label: '52A' });
   });
