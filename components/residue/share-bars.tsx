@@ -1,3 +1,4 @@
+import { counted } from '@/components/ui/count-words';
 import { color, conservationColor, face } from '@/components/theme';
 
 export interface LetterShare {
@@ -17,7 +18,7 @@ export interface ShareBarsProps {
 
 /** `70 %, 34 rows`. */
 export const shareWords = ({ share, rowCount }: LetterShare): string =>
-  `${Math.round(share * 100)} %, ${rowCount} ${rowCount === 1 ? 'row' : 'rows'}`;
+  `${Math.round(share * 100)} %, ${counted(rowCount, 'row')}`;
 
 /** What the rows of the alignment carry in this column: letter, bar, share and count. */
 export function ShareBars({ shares, own, label }: ShareBarsProps) {

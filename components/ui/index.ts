@@ -23,6 +23,7 @@
  *   BothTexts    sentence rows[{ key, name, theirs, mine }] onTakeTheirs onKeepMine busyText?   (after a conflict)
  *   Dialog       open title onClose actions?                 Sheet  open title onClose
  *   Key, Time iso form?, Markdown text linkify?, Logo
+ *   counted, countWords                                      `3 copies`, `no copies`
  */
 export { Text, type TextProps } from './text';
 export { Stack, Row, type RowProps, type StackProps } from './stack';
@@ -49,6 +50,7 @@ export {
   type IssueView,
 } from './issue-list';
 export { StageScale, stagePercent, uploadStages, type StageScaleProps } from './stage-scale';
+export { counted, countWords } from './count-words';
 export { Empty, type EmptyProps } from './empty';
 export { Loading } from './loading';
 export { NothingHere, ReadView, type ReadState, type ReadViewProps } from './read-view';

@@ -12,7 +12,7 @@ export { ChainDecision } from './components/chain-decision';
 export { CoverageStrip } from './components/coverage-strip';
 export { MapExceptions } from './components/map-exceptions';
 export { StandingMark } from './components/standing-mark';
-export { authorShift, countWords, percentWords, shiftWords, stretchWords } from './map-words';
+export { authorShift, percentWords, shiftWords, stretchWords } from './map-words';
 export { preferredLabel } from './preferred-label';
 export { useDecideChains, type DecideChains, type MapDecision } from './use-decide-chains';
 export { useConfirmReady, useDecideMap } from './use-maps';

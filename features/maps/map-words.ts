@@ -1,13 +1,11 @@
 import type { ChainMap } from '@/shared/contracts/maps';
+import { countWords } from '@/components/ui/count-words';
 
 /** `98.7 %`, kept on one line; what is not whole never reads as 100. */
 export function percentWords(fraction: number): string {
   const rounded = Math.round(fraction * 1000) / 10;
   return `${fraction < 1 ? Math.min(99.9, rounded) : rounded}\u00a0%`;
 }
-
-export const countWords = (count: number, one: string, many = `${one}s`): string =>
-  `${count === 0 ? 'no' : count} ${count === 1 ? one : many}`;
 
 /** How author numbers relate to places in the sequence, seen at both ends of the chain; null when it isn't one shift. */
 export function authorShift({

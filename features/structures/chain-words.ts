@@ -1,4 +1,5 @@
-import { countWords, mismatchCount, percentWords, runnerUp, type ChainGroup } from '@/features/maps';
+import { countWords } from '@/components/ui/count-words';
+import { mismatchCount, percentWords, runnerUp, type ChainGroup } from '@/features/maps';
 import type { ChainMap } from '@/shared/contracts/maps';
 
 const letters = (chain: ChainMap): string => countWords(chain.observedLength, 'residue');

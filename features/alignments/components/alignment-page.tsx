@@ -3,10 +3,10 @@ import type { Family } from '@/shared/contracts/families';
 import { PageTitle, Screen } from '@/components/layout';
 import { FamilyTag } from '@/components/residue';
 import { useLayout } from '@/components/theme';
-import { Button, Caption, IssueList, Link, Row, Stack, Text, Time } from '@/components/ui';
+import { Button, Caption, Row, Stack, Text, Time } from '@/components/ui';
 import { familyPath, findPath, newUploadPath, uploadPath } from '@/client/paths';
 import { useMay } from '@/features/projects';
-import { useUploads } from '@/features/uploads';
+import { FoundWhileReading, useUploads } from '@/features/uploads';
 import type { AlignmentWithRows } from '../apply-alignment-event';
 import { AlignmentRows } from './alignment-rows';
 
@@ -17,7 +17,6 @@ interface AlignmentPageProps {
 }
 
 const formatWords: Record<string, string> = { fasta: 'aligned FASTA' };
-const warnings = (count: number): string => `${count} ${count === 1 ? 'warning' : 'warnings'}`;
 
 /** An alignment as it was read: what it is, what was doubtful, and its rows. */
 export function AlignmentPage({ projectId, alignment, family }: AlignmentPageProps) {
@@ -62,26 +61,7 @@ export function AlignmentPage({ projectId, alignment, family }: AlignmentPagePro
           </div>
           {hasRail ? upload : null}
         </Row>
-        {issues.length > 0 ? (
-          <Stack gap={4}>
-            <Caption
-              count={warnings(issues.length)}
-              action={source ? <Link href={uploadPath(projectId, source.id)}>In the file</Link> : undefined}
-            >
-              Found while reading
-            </Caption>
-            <IssueList
-              label="Found while reading"
-              issues={issues.map(({ severity, line, column, message }, place) => ({
-                key: String(place),
-                severity,
-                line,
-                column,
-                sentence: message,
-              }))}
-            />
-          </Stack>
-        ) : null}
+        <FoundWhileReading issues={issues} uploadHref={source && uploadPath(projectId, source.id)} />
         <Stack gap={8}>
           <Caption count={`${rowCount}, each a protein of the family`}>Rows</Caption>
           <AlignmentRows projectId={projectId} alignment={alignment} />

@@ -1,7 +1,7 @@
 import { useId, useState, type ReactNode } from 'react';
 import type { Annotation } from '@/shared/contracts/annotations';
 import { TextArea } from '@/components/form';
-import { Banner, Button, Card, Row, Stack, Text, Time } from '@/components/ui';
+import { Banner, Button, Card, counted, Row, Stack, Text, Time } from '@/components/ui';
 import type { ApiProblem } from '@/client/problem';
 import type { AnnotationValues } from '../annotation-values';
 import { joinContent } from '../join-content';
@@ -75,7 +75,7 @@ export function Conflict({ base, mine, theirs, isSaving, problem, onSave, onTake
         hint={
           joined.bothChanged === 0
             ? 'The changes stand in different places; both are taken.'
-            : `In ${joined.bothChanged} ${joined.bothChanged === 1 ? 'place' : 'places'} both changed the same words: yours stand before theirs. Read it through.`
+            : `In ${counted(joined.bothChanged, 'place')} both changed the same words: yours stand before theirs. Read it through.`
         }
       />
       <Refusal problem={problem} />

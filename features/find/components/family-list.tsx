@@ -1,10 +1,7 @@
 import type { Family } from '@/shared/contracts/families';
 import { FamilyTag, partWords } from '@/components/residue';
-import { List, ListRow } from '@/components/ui';
+import { countWords, List, ListRow } from '@/components/ui';
 import { familyPath } from '@/client/paths';
-
-const proteinWords = (count: number): string =>
-  count === 0 ? 'no proteins' : `${count} ${count === 1 ? 'protein' : 'proteins'}`;
 
 export function FamilyList({ projectId, families }: { projectId: string; families: readonly Family[] }) {
   return (
@@ -15,7 +12,7 @@ export function FamilyList({ projectId, families }: { projectId: string; familie
           lead={<FamilyTag family={name} part={part} />}
           title={description || partWords[part]}
           detail={description ? partWords[part] : undefined}
-          end={proteinWords(proteinCount)}
+          end={countWords(proteinCount, 'protein')}
         />
       )}
     </List>

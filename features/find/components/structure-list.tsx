@@ -1,8 +1,6 @@
 import type { Structure } from '@/shared/contracts/structures';
-import { List, ListRow, Mark } from '@/components/ui';
+import { counted, List, ListRow, Mark } from '@/components/ui';
 import { structurePath } from '@/client/paths';
-
-const chainWords = (count: number): string => `${count} ${count === 1 ? 'chain' : 'chains'}`;
 
 export function StructureList({
   projectId,
@@ -17,10 +15,10 @@ export function StructureList({
         <ListRow
           href={structurePath(projectId, id)}
           title={name}
-          detail={[`revision ${revision}`, chainWords(chainCount), title].filter(Boolean).join(', ')}
+          detail={[`revision ${revision}`, counted(chainCount, 'chain'), title].filter(Boolean).join(', ')}
           end={
             waiting > 0 ? (
-              <Mark tone="warn">{`${chainWords(waiting)} to confirm`}</Mark>
+              <Mark tone="warn">{`${counted(waiting, 'chain')} to confirm`}</Mark>
             ) : (
               <Mark tone="good">map confirmed</Mark>
             )

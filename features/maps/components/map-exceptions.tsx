@@ -2,11 +2,10 @@ import { useState } from 'react';
 import type { ChainMap } from '@/shared/contracts/maps';
 import type { Family } from '@/shared/contracts/families';
 import { FamilyTag, Plate } from '@/components/residue';
-import { Button, Caption, List, ListRow, Mark, Stack } from '@/components/ui';
+import { Button, Caption, countWords, List, ListRow, Mark, Stack } from '@/components/ui';
 import { residuePath } from '@/client/paths';
 import { useProtein } from '@/features/families';
 import { exceptionRuns } from '../exception-runs';
-import { countWords } from '../map-words';
 import { preferredLabel } from '../preferred-label';
 
 interface MapExceptionsProps {

@@ -2,7 +2,7 @@ import PencilRuler from 'lucide-react-native/icons/pencil-ruler';
 import type { ResidueLabel } from '@/shared/contracts/common';
 import type { Mutant } from '@/shared/contracts/plans';
 import { Plate, plateWords } from '@/components/residue';
-import { Button, Caption, Empty, List, ListRow, ReadView } from '@/components/ui';
+import { Button, Caption, counted, Empty, List, ListRow, ReadView } from '@/components/ui';
 import { mutantPath, newMutantPath } from '@/client/paths';
 import { useMutants } from '@/features/plans';
 import { useMay } from '@/features/projects';
@@ -71,7 +71,7 @@ function MutantRow({ projectId, residue, mutant }: MutantsSectionProps & { mutan
       title={mutant.state}
       detail={[
         mutant.name,
-        more > 0 ? `with ${more} more ${more === 1 ? 'change' : 'changes'}` : null,
+        more > 0 ? `with ${counted(more, 'more change')}` : null,
         mutant.constructName ? `in ${mutant.constructName}` : 'no construct chosen',
       ]
         .filter((words) => words !== null)

@@ -1,16 +1,14 @@
 import type { Passport } from '@/shared/contracts/residues';
-import { Caption, CopyButton } from '@/components/ui';
+import { Caption, CopyButton, counted } from '@/components/ui';
 import { passportText } from '../passport-text';
 import { PassportList } from './passport-list';
-
-const counted = (count: number, one: string, many: string): string => `${count} ${count === 1 ? one : many}`;
 
 /** Everything the residue is called. */
 export function PassportSection({ passport }: { passport: Passport }) {
   const { labels, equivalents, copies } = passport;
   const counts = [
-    counted(labels.length, 'numbering', 'numberings'),
-    counted(equivalents.length, 'equivalent', 'equivalents'),
+    counted(labels.length, 'numbering'),
+    counted(equivalents.length, 'equivalent'),
     counted(copies.length, 'copy', 'copies'),
   ];
   return (

@@ -1,7 +1,7 @@
 import { useId } from 'react';
 import ListTree from 'lucide-react-native/icons/list-tree';
 import { color, face } from '@/components/theme';
-import { Banner, Loading, Mark, Text } from '@/components/ui';
+import { Banner, counted, Loading, Mark, Text } from '@/components/ui';
 import { groupReadings, type ReadingGroup } from '../group-readings';
 import type { Locator } from '../use-locator';
 import { ReadingOption } from './reading-option';
@@ -58,9 +58,6 @@ function Group({ group, locator, id }: { group: ReadingGroup; locator: Locator; 
   );
 }
 
-const countWords = (count: number, more: boolean): string =>
-  `${more ? 'the first ' : ''}${count} ${count === 1 ? 'reading' : 'readings'}`;
-
 /** What the text can mean, by kind of reading, and what it was not read as. */
 export function ReadingList({ locator }: { locator: Locator }) {
   const id = useId();
@@ -75,7 +72,7 @@ export function ReadingList({ locator }: { locator: Locator }) {
         {shown && count > 0 ? (
           <>
             <Mark tone="warn" icon={ListTree}>
-              {countWords(count, found.more)}
+              {`${found.more ? 'the first ' : ''}${counted(count, 'reading')}`}
             </Mark>{' '}
             of <b style={{ font: `600 14px/20px ${face.mono}` }}>{found.text}</b>.{' '}
             {asksToChoose ? <b>Choose one with the arrow keys or a press.</b> : null}

@@ -2,10 +2,8 @@ import type { CSSProperties, HTMLAttributes } from 'react';
 import type { Reading } from '@/shared/contracts/residues';
 import { Plate, plateWords, wordsForCode } from '@/components/residue';
 import { color, face } from '@/components/theme';
-import { Mark } from '@/components/ui';
+import { countWords, Mark } from '@/components/ui';
 
-const pinWords = (count: number): string =>
-  count === 0 ? 'no pins' : `${count} ${count === 1 ? 'pin' : 'pins'}`;
 const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1);
 const frame = (on: boolean): CSSProperties => ({
   display: 'grid',
@@ -47,7 +45,7 @@ export function ReadingOption({ reading, highlighted, option }: ReadingOptionPro
         <div style={{ color: color.inkSoft }}>{why}</div>
         {mismatch ? <Mark tone="warn">{mismatch}</Mark> : null}
       </div>
-      <span style={{ color: color.inkSoft, whiteSpace: 'nowrap' }}>{pinWords(pinCount)}</span>
+      <span style={{ color: color.inkSoft, whiteSpace: 'nowrap' }}>{countWords(pinCount, 'pin')}</span>
     </div>
   );
 }

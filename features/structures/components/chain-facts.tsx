@@ -1,14 +1,7 @@
 import type { ChainMap } from '@/shared/contracts/maps';
-import { KeyValueList, KeyValueRow, Link, Stack } from '@/components/ui';
+import { countWords, KeyValueList, KeyValueRow, Link, Stack } from '@/components/ui';
 import { proteinPath } from '@/client/paths';
-import {
-  authorShift,
-  countWords,
-  CoverageStrip,
-  percentWords,
-  shiftWords,
-  stretchWords,
-} from '@/features/maps';
+import { authorShift, CoverageStrip, percentWords, shiftWords, stretchWords } from '@/features/maps';
 import { runnerUpName, runnerUpWords } from '../chain-words';
 
 /** What is known of a chain and of how it lies on its protein. */

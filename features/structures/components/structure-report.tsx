@@ -2,8 +2,9 @@ import type { ReactNode } from 'react';
 import type { StructureWithChains } from '@/shared/contracts/structures';
 import { PageTitle } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Banner, Caption, IssueList, Link, Row, Stack, StageScale, Text, Time } from '@/components/ui';
-import { countOf, countWords, standings } from '@/features/maps';
+import { Banner, Caption, counted, Row, Stack, StageScale, Text, Time } from '@/components/ui';
+import { countOf, standings } from '@/features/maps';
+import { FoundWhileReading } from '@/features/uploads';
 import { ChainList, type ChainsProps } from './chain-list';
 import { ChainTable } from './chain-table';
 
@@ -52,26 +53,7 @@ export function StructureReport(props: StructureReportProps) {
         <Caption count={counts}>Chains</Caption>
         {layout.name === 'three' ? <ChainTable {...props} /> : <ChainList {...props} />}
       </Stack>
-      {issues.length > 0 ? (
-        <Stack gap={4}>
-          <Caption
-            count={countWords(issues.length, 'warning')}
-            action={uploadHref ? <Link href={uploadHref}>In the file</Link> : undefined}
-          >
-            Found while reading
-          </Caption>
-          <IssueList
-            label="Found while reading"
-            issues={issues.map(({ severity, line, column, message }, place) => ({
-              key: String(place),
-              severity,
-              line,
-              column,
-              sentence: message,
-            }))}
-          />
-        </Stack>
-      ) : null}
+      <FoundWhileReading issues={issues} uploadHref={uploadHref} />
     </Stack>
   );
 }
@@ -87,5 +69,5 @@ const wordOf: Record<(typeof standings)[number], string> = {
 
 function waitingWords(waiting: number, mayConfirm: boolean): string {
   const who = mayConfirm ? 'you, or another curator' : 'a curator';
-  return `${countWords(waiting, 'protein chain')} ${waiting === 1 ? 'waits' : 'wait'} for ${who}.`;
+  return `${counted(waiting, 'protein chain')} ${waiting === 1 ? 'waits' : 'wait'} for ${who}.`;
 }

@@ -1,6 +1,6 @@
 import type { Thread } from '@/shared/contracts/threads';
 import { Plate, plateWords } from '@/components/residue';
-import { Banner, Button, Empty, List, ListRow, Loading, Stack, Time } from '@/components/ui';
+import { Banner, Button, counted, Empty, List, ListRow, Loading, Stack, Time } from '@/components/ui';
 import { threadPath } from '@/client/paths';
 import { useThreads } from '../use-threads';
 
@@ -32,7 +32,7 @@ function Row({ projectId, thread, selected }: { projectId: string; thread: Threa
         <>
           {lastWords(thread)}
           <span style={{ display: 'block', fontSize: 12, lineHeight: '16px', paddingTop: 2 }}>
-            {messageCount} {messageCount === 1 ? 'message' : 'messages'}
+            {counted(messageCount, 'message')}
             {lastMessage ? ', ' : ''}
             {lastMessage ? <Time iso={lastMessage.at} /> : null}
           </span>

@@ -1,6 +1,6 @@
 import { useMemo, type ReactNode } from 'react';
 import type { Subject } from '@/shared/contracts/threads';
-import { Banner, Button, Caption, Empty, Loading, Text } from '@/components/ui';
+import { Banner, Button, Caption, counted, Empty, Loading, Text } from '@/components/ui';
 import { composerPlace } from '@/client/queued-message';
 import { useDraft } from '@/client/use-draft';
 import { useMay } from '@/features/projects';
@@ -17,8 +17,6 @@ export interface ThreadPanelProps {
   title?: string | false;
   captionAction?: ReactNode;
 }
-
-const countWords = (count: number): string => `${count} ${count === 1 ? 'message' : 'messages'}`;
 
 /** The main thread of a subject: its minutes, what is on its way, and where one writes. */
 export function ThreadPanel({
@@ -60,7 +58,7 @@ export function ThreadPanel({
     >
       {title === false ? null : (
         <Caption
-          count={data?.thread ? countWords(data.thread.messageCount) : undefined}
+          count={data?.thread ? counted(data.thread.messageCount, 'message') : undefined}
           action={captionAction}
         >
           {title}

@@ -6,7 +6,7 @@ export type KeyedIssue = Upload['issues'][number] & { key: string };
 export const keyed = (issues: Upload['issues']): KeyedIssue[] =>
   issues.map((issue, at) => ({ ...issue, key: String(at) }));
 
-const toView = ({ key, severity, line, column, message }: KeyedIssue): IssueView => ({
+export const toView = ({ key, severity, line, column, message }: KeyedIssue): IssueView => ({
   key,
   severity,
   line,
