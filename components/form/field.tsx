@@ -26,8 +26,10 @@ export interface FieldProps extends FieldWords {
 }
 
 /** Label above, hint and error below. */
-export function Field({ label, hint, error, labelEnd, quietLabel, children }: FieldProps) {
+export function Field({ label, hint: given, error, labelEnd, quietLabel, children }: FieldProps) {
   const id = useId();
+  // The hint often says what the error then says: once is enough.
+  const hint = given === error ? undefined : given;
   const described = [hint ? `${id}-hint` : '', error ? `${id}-error` : ''].filter(Boolean).join(' ');
   const ids: ControlIds = {
     id,

@@ -95,7 +95,9 @@ export function useChooseDesign(projectId: string) {
 }
 
 /** The chosen primers as CSV, with the caution in it, offered to be saved. */
-export async function downloadPrimerList(projectId: string): Promise<void> {
+export async function downloadPrimerList(projectId: string): Promise<string> {
   const { text, fileName } = await downloadText(plans.primerList, { params: { projectId } });
-  saveFile(text, fileName ?? 'primers.csv', 'text/csv;charset=utf-8');
+  const savedAs = fileName ?? 'primers.csv';
+  saveFile(text, savedAs, 'text/csv;charset=utf-8');
+  return savedAs;
 }

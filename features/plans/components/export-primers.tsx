@@ -6,18 +6,22 @@ import { useMay } from '@/features/projects';
 import { downloadPrimerList } from '../use-plans';
 import { Caution } from './caution';
 
-function useExport(projectId: string) {
-  const [state, setState] = useState<{ busy: boolean; refusal: string | null }>({
-    busy: false,
-    refusal: null,
-  });
+interface ExportState {
+  busy: boolean;
+  savedAs: string | null;
+  refusal: string | null;
+}
+
+function useExport(projectId: string, onSaved?: () => void) {
+  const [state, setState] = useState<ExportState>({ busy: false, savedAs: null, refusal: null });
   const run = async () => {
-    setState({ busy: true, refusal: null });
+    setState({ busy: true, savedAs: null, refusal: null });
     try {
-      await downloadPrimerList(projectId);
-      setState({ busy: false, refusal: null });
+      const savedAs = await downloadPrimerList(projectId);
+      setState({ busy: false, savedAs, refusal: null });
+      onSaved?.();
     } catch (error) {
-      setState({ busy: false, refusal: asApiProblem(error).message });
+      setState({ busy: false, savedAs: null, refusal: asApiProblem(error).message });
     }
   };
   return { ...state, run };
@@ -29,11 +33,13 @@ interface ExportButtonProps {
   /** Why there is nothing to export. */
   offReason?: string;
   full?: boolean;
+  /** After the file is saved; a phone shows no sign of a download. */
+  onSaved?: () => void;
 }
 
 /** Saves the project's primers as CSV. Stands below a <Caution>. */
-export function ExportButton({ projectId, kind, offReason, full }: ExportButtonProps) {
-  const { busy, refusal, run } = useExport(projectId);
+export function ExportButton({ projectId, kind, offReason, full, onSaved }: ExportButtonProps) {
+  const { busy, savedAs, refusal, run } = useExport(projectId, onSaved);
   const may = useMay(projectId);
   if (!may('export')) return null;
   return (
@@ -48,6 +54,7 @@ export function ExportButton({ projectId, kind, offReason, full }: ExportButtonP
       >
         Export primers
       </Button>
+      {savedAs ? <Banner kind="good">{`Saved as ${savedAs}.`}</Banner> : null}
       {refusal ? <Banner kind="danger">{refusal}</Banner> : null}
     </Stack>
   );
@@ -71,7 +78,7 @@ export function ExportWithCaution({ projectId, kind }: Pick<ExportButtonProps, '
         actions={
           <>
             <Button onPress={close}>Not now</Button>
-            <ExportButton projectId={projectId} kind="primary" />
+            <ExportButton projectId={projectId} kind="primary" onSaved={close} />
           </>
         }
       >
