@@ -7,6 +7,8 @@ export interface ClaimedJob {
   subjectId: string;
   /** How often it was taken, this time included. */
   attempts: number;
+  /** The last attempt ended by an error, not by the end of its process. */
+  failed: boolean;
 }
 
 /** The job is no longer this taker's: somebody else has it, or it is finished. Nothing may be written for it. */

@@ -12,7 +12,7 @@ const nobody = '00000000-0000-0000-0000-000000000000';
  * locked, and takers pass over each other's.
  */
 export const claimStatement =
-  "SELECT id, kind, project_id, subject_id, attempts FROM job WHERE state = 'ready' AND run_at <= ?" +
+  "SELECT id, kind, project_id, subject_id, attempts, error FROM job WHERE state = 'ready' AND run_at <= ?" +
   ' ORDER BY run_at, id LIMIT 1 FOR UPDATE SKIP LOCKED';
 
 interface ClaimRow {
@@ -21,6 +21,7 @@ interface ClaimRow {
   project_id: string;
   subject_id: string;
   attempts: number;
+  error: string | null;
 }
 
 type LeaseEnd = Partial<Omit<Job, 'id' | 'payload'>>;
@@ -59,6 +60,7 @@ export class JobQueue {
         projectId: row.project_id,
         subjectId: row.subject_id,
         attempts,
+        failed: row.error !== null,
       };
     });
   }
@@ -68,7 +70,7 @@ export class JobQueue {
     await this.unitOfWork.reader
       .createQueryBuilder()
       .update(Job)
-      .set({ state: 'ready', leasedBy: null, leaseUntil: null })
+      .set({ state: 'ready', leasedBy: null, leaseUntil: null, error: null })
       .where("state = 'running' AND lease_until < :now", { now })
       .execute();
   }

@@ -8,13 +8,21 @@ interface Settings {
   concurrency: number;
   /** How often the queue is asked when nobody wakes the runner. */
   pollMilliseconds: number;
-  /** A job taken more often than this is given up. */
+  /** A job that fails after being taken so often is given up. */
   attempts: number;
+  /** So is one that was taken so often while its processes died: it may be what brings them down. */
+  deaths: number;
   /** Wait before the second attempt; it doubles with each further one. */
   firstWaitMilliseconds: number;
 }
 
-const usual: Settings = { concurrency: 2, pollMilliseconds: 1000, attempts: 4, firstWaitMilliseconds: 1000 };
+const usual: Settings = {
+  concurrency: 2,
+  pollMilliseconds: 1000,
+  attempts: 4,
+  deaths: 20,
+  firstWaitMilliseconds: 1000,
+};
 
 /** Takes jobs and does them until it is stopped. Any process may die at any time: the leases of its jobs run out. */
 export class JobRunner {
@@ -116,7 +124,9 @@ export class JobRunner {
   private attempt(job: ClaimedJob, done: JobControl, failed: JobControl): Promise<void> {
     const handler = this.handlers[job.kind];
     if (!handler) throw new Error(`Nobody does jobs of the kind ${job.kind}.`);
-    return job.attempts > this.settings.attempts ? handler.giveUp(job, failed) : handler.run(job, done);
+    const { attempts, deaths } = this.settings;
+    const isHopeless = job.attempts > (job.failed ? attempts : deaths);
+    return isHopeless ? handler.giveUp(job, failed) : handler.run(job, done);
   }
 
   private async afterFailure(job: ClaimedJob, error: unknown): Promise<void> {

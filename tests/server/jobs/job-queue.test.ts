@@ -165,9 +165,21 @@ describe('an upload’s job', () => {
     expect(job).toMatchObject({ state: 'done', attempts: 2, leaseUntil: null });
   });
 
-  it('given up after too many attempts refuses the upload with words', async () => {
+  it('is read however often servers were killed or stopped under it, within reason', async () => {
     const uploadId = await sendUpload();
-    await manager().update(Job, { subjectId: uploadId }, { attempts: 4 });
+    await manager().update(Job, { subjectId: uploadId }, { attempts: 19 });
+    const runner = new JobRunner(queue(), { 'alignment.read': reader(pool) }, log, { pollMilliseconds: 50 });
+    runner.start();
+    expect((await lead.settled(projectId, uploadId)).state).toBe('done');
+    await runner.stop();
+  });
+
+  it.each([
+    ['failures', 4, 'Error: no such luck'],
+    ['ends of its server', 20, null],
+  ])('given up after too many %s refuses the upload with words', async (_, attempts, error) => {
+    const uploadId = await sendUpload();
+    await manager().update(Job, { subjectId: uploadId }, { attempts, error });
     const runner = new JobRunner(queue(), { 'alignment.read': reader(pool) }, log, { pollMilliseconds: 50 });
     runner.start();
     const upload = await lead.settled(projectId, uploadId);
