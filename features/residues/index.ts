@@ -1,3 +1,1 @@
-export { LocatorBox } from './components/locator-box';
-export { applyToLocated, applyToPassport } from './apply-residue-event';
-export { useLocate, usePassport } from './use-residues';
+export { LateLocatorBox as LocatorBox } from './components/late-locator-box';

@@ -11,6 +11,8 @@ export interface LocatorOptions {
   projectId: string;
   onOpen: (reading: Reading) => void;
   initialText?: string;
+  /** The list is open at once: its text was typed before. */
+  startsOpen?: boolean;
   /** The list belongs to the page and is never closed. */
   stays?: boolean;
   /** Opens the only reading without waiting for Enter: a link said this address. */
@@ -21,7 +23,8 @@ export interface LocatorOptions {
  * The box that reads addresses. Nothing is chosen before Enter on a highlighted row, neither by leaving the box nor by
  * passing over a row. Enter without one opens the only reading, or asks to choose.
  */
-export function useLocator({ projectId, onOpen, initialText = '', stays, opensOnly }: LocatorOptions) {
+export function useLocator(options: LocatorOptions) {
+  const { projectId, onOpen, initialText = '', startsOpen = false, stays, opensOnly } = options;
   const [text, setText] = useState(initialText);
   /** The text that Enter was pressed on, while its readings may still be under way. */
   const [asked, setAsked] = useState<string | null>(opensOnly ? initialText : null);
@@ -44,6 +47,7 @@ export function useLocator({ projectId, onOpen, initialText = '', stays, opensOn
     inputValue: text,
     selectedItem: null,
     defaultHighlightedIndex: -1,
+    initialIsOpen: startsOpen,
     ...(stays ? { isOpen: true } : null),
     itemToString: () => text,
     isItemDisabled: () => !isFresh,

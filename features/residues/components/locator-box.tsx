@@ -1,5 +1,6 @@
 import { useEffect, useRef, useState, type CSSProperties } from 'react';
 import { color, layer, lift, useLayout } from '@/components/theme';
+import type { EarlyEntry } from '../late-parts';
 import { useLocator, type Locator } from '../use-locator';
 import { useOpenReading } from '../use-open-reading';
 import { KeyHints } from './key-hints';
@@ -10,10 +11,22 @@ import { ReadingPreview } from './reading-preview';
 const widest = 1000;
 const listWidth = 600;
 
+interface LocatorBoxProps {
+  projectId: string;
+  /** What was typed before this box was here. */
+  early: EarlyEntry;
+}
+
 /** The box that finds residues, with its panel under it. */
-export function LocatorBox({ projectId }: { projectId: string }) {
+export function LocatorBox({ projectId, early }: LocatorBoxProps) {
   const onOpen = useOpenReading(projectId);
-  const locator = useLocator({ projectId, onOpen });
+  const locator = useLocator({
+    projectId,
+    onOpen,
+    initialText: early.text,
+    startsOpen: early.text !== '',
+    opensOnly: early.asks,
+  });
   const frame = useRef<HTMLDivElement>(null);
   return (
     <div ref={frame} style={{ position: 'relative', minWidth: 0 }}>

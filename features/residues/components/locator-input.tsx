@@ -1,12 +1,15 @@
-import type { CSSProperties } from 'react';
+import type { CSSProperties, InputHTMLAttributes } from 'react';
 import Search from 'lucide-react-native/icons/search';
 import X from 'lucide-react-native/icons/x';
 import { color, face } from '@/components/theme';
 import { Icon, IconButton, Key } from '@/components/ui';
 import type { Locator } from '../use-locator';
 
+/** What is typed, and the list it opens: none before the list's code is here. */
+export type LocatorEntry = Pick<Locator, 'text' | 'write' | 'ask'> & { box?: Locator['box'] };
+
 interface LocatorInputProps {
-  locator: Locator;
+  locator: LocatorEntry;
   /** The tall one of the full screen. */
   large?: boolean;
   autoFocus?: boolean;
@@ -26,7 +29,7 @@ const frame = (large: boolean): CSSProperties => ({
 /** Where an address is typed. Enter goes, Esc closes. */
 export function LocatorInput({ locator, large = false, autoFocus }: LocatorInputProps) {
   const { box, text, write, ask } = locator;
-  const input = box.getInputProps({
+  const own: InputHTMLAttributes<HTMLInputElement> = {
     'aria-label': 'Find a residue',
     placeholder: large ? 'cE59, βK158, K:59' : 'Find a residue: cE59, βK158, K:59',
     autoFocus,
@@ -36,15 +39,18 @@ export function LocatorInput({ locator, large = false, autoFocus }: LocatorInput
     enterKeyHint: 'go',
     inputMode: 'search',
     maxLength: 200,
+    value: text,
     // Written here and not by the list's own state, so that the caret stays where it is.
     onChange: (event) => write(event.currentTarget.value),
     onKeyDown: (event) => {
-      if (event.key !== 'Enter' || event.nativeEvent.isComposing || box.highlightedIndex >= 0) return;
+      if (event.key !== 'Enter' || event.nativeEvent.isComposing) return;
+      if (box && box.highlightedIndex >= 0) return;
       event.preventDefault();
       Object.assign(event.nativeEvent, { preventDownshiftDefault: true });
       ask();
     },
-  });
+  };
+  const input = box ? box.getInputProps(own) : own;
   return (
     <div className="control" style={frame(large)}>
       <Icon of={Search} tone="soft" />

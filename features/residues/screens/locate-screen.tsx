@@ -1,15 +1,12 @@
+import { useRef } from 'react';
 import { z } from 'zod';
 import { projectParams } from '@/shared/contracts/common';
-import { PageTitle, Panes, Screen } from '@/components/layout';
-import { useLayout } from '@/components/theme';
-import { NothingHere, Stack } from '@/components/ui';
-import { findPath } from '@/client/paths';
+import { Screen } from '@/components/layout';
+import { NothingHere } from '@/components/ui';
 import { useRouteParams } from '@/client/use-route-params';
+import { LocateFrame } from '../components/locate-frame';
 import { LocatorInput } from '../components/locator-input';
-import { ReadingList } from '../components/reading-list';
-import { ReadingPreview } from '../components/reading-preview';
-import { useLocator } from '../use-locator';
-import { useOpenReading } from '../use-open-reading';
+import { useEarlyEntry, useLateParts } from '../late-parts';
 
 const locateParams = projectParams.extend({ text: z.string().max(200).optional() });
 
@@ -25,43 +22,16 @@ export function LocateScreen() {
 }
 
 function Locate({ projectId, text }: { projectId: string; text?: string }) {
-  const { hasRail } = useLayout();
-  // A link with one reading goes straight there, and back leads to where the link stood.
-  const onOpen = useOpenReading(projectId, text ? 'replace' : 'push');
-  const locator = useLocator({
-    projectId,
-    onOpen,
-    initialText: text ?? '',
-    stays: true,
-    opensOnly: text !== undefined,
-  });
-  const list = (
-    <Stack>
-      <PageTitle quietOnPhone>Find a residue</PageTitle>
-      <LocatorInput locator={locator} large autoFocus />
-      <ReadingList locator={locator} />
-    </Stack>
-  );
-  if (!hasRail)
-    return (
-      <Screen title="Find a residue" backHref={findPath(projectId)}>
-        {list}
-      </Screen>
-    );
+  const place = useRef<HTMLDivElement>(null);
+  const parts = useLateParts(place);
+  const early = useEarlyEntry(text);
   return (
-    <Screen kind="panes" title="Find a residue">
-      <Panes
-        name="locate"
-        panes={[
-          { key: 'readings', label: 'Readings', content: list },
-          {
-            key: 'passport',
-            label: 'Passport of the highlighted reading',
-            widthPixels: 440,
-            content: <ReadingPreview projectId={projectId} reading={locator.highlighted} />,
-          },
-        ]}
-      />
-    </Screen>
+    <div ref={place} style={{ display: 'contents' }}>
+      {parts ? (
+        <parts.LocatePage projectId={projectId} linked={text} early={early} />
+      ) : (
+        <LocateFrame projectId={projectId} list={<LocatorInput locator={early} large autoFocus />} />
+      )}
+    </div>
   );
 }
