@@ -37,7 +37,7 @@ export class Visitor {
     page.on('pageerror', (error) => visitor.complaints.push(`error: ${error.message}`));
     page.on('console', (message) => {
       // A refused request is a line of the browser's own; what the page makes of it is looked at on the page.
-      const isOwn = !/Failed to load resource/.test(message.text());
+      const isOwn = !/Failed to load resource|ERR_INTERNET_DISCONNECTED/.test(message.text());
       if (message.type() === 'error' && isOwn) visitor.complaints.push(`console: ${message.text()}`);
     });
     return visitor;

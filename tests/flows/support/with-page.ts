@@ -31,5 +31,5 @@ async function pageInWords(page: Page): Promise<string> {
   const dialog = page.getByRole('dialog');
   const shown = (await dialog.count()) > 0 ? dialog.last() : page.locator('main');
   const words = await shown.ariaSnapshot({ timeout: 2_000 }).catch(() => 'The page could not be read.');
-  return words.slice(0, 8_000);
+  return words.slice(0, 5_000);
 }
