@@ -1,10 +1,8 @@
 import type { Issue } from '@/shared/sequence/parse-result';
 
-/** 0 done (warnings allowed), 1 the input cannot be used, 2 wrong usage. */
-export type ExitCode = 0 | 1 | 2;
-
 export interface CommandResult {
-  exitCode: number;
+  /** 0 done (warnings allowed), 1 the input cannot be used, 2 wrong usage. */
+  exitCode: 0 | 1 | 2;
   /** Printed as one JSON object, after `"version": 1`. Null only with exit code 2. */
   output: object | null;
   /** One line for standard error, with exit code 2. */

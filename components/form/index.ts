@@ -11,11 +11,9 @@
  *   BoundText, BoundArea, BoundSelect, BoundCheckbox, BoundChoice; wrongWords? (instead of the schema's) emptyIsNone?
  *   Form        onSubmit() gap?
  */
-export { Field, type ControlIds, type FieldProps, type FieldWords } from './field';
-export { TextInput, type TextInputProps } from './text-input';
-export { TextArea, type TextAreaProps } from './text-area';
-export { Select, type SelectOption, type SelectProps } from './select';
-export { Checkbox, type CheckboxProps } from './checkbox';
-export { FileDrop, type FileDropProps } from './file-drop';
+export { TextInput } from './text-input';
+export { TextArea } from './text-area';
+export { Select } from './select';
+export { FileDrop } from './file-drop';
 export { BoundArea, BoundCheckbox, BoundChoice, BoundSelect, BoundText } from './bound';
 export { Form } from './form';

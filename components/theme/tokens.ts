@@ -63,8 +63,6 @@ export const lift = {
   sheet: 'var(--lift-3)',
 } as const;
 
-/** Spacing in pixels, base 4. */
-export const space = { 0: 0, 1: 4, 2: 8, 3: 12, 4: 16, 5: 20, 6: 24, 8: 32, 10: 40, 12: 48, 16: 64 } as const;
 export const radius = { none: 0, plate: 3, control: 4, dialog: 6, sheet: 12 } as const;
 export const layer = { sticky: 10, rail: 20, popover: 40, sheet: 50, dialog: 60, toast: 70 } as const;
 

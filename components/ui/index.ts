@@ -10,13 +10,13 @@
  *   Tabs         items[{ key, label, count? }] current onChange label panelId?
  *   Segment      options[{ value, label }] value onChange label
  *   Choice       options[{ value, title, consequence?, offReason? }] value onChange label
- *   Banner       kind? note warn danger good, action? announce?     Mark  tone? icon?    Toast  onUndo?
+ *   Banner       kind? note warn danger good, action? announce?     Mark  tone? icon?
  *   IssueList    issues[{ key, severity, line?, column?, sentence, advice? }] label selectedKey? onOpen?
  *   StageScale   stage share? state? sentence? stages? label?
  *   Empty        title children action?                      Loading  children: what is being read
  *   ReadView     of: a data hook's answer, what, children(value)   NothingHere  action?
  *   Person       name presence?                              Status   status
- *   CheckList    checks[{ result, name, value?, limit? }] label      Tally  cells[{ key, count, word, tone? }] label
+ *   CheckList    checks[{ result, name, value?, limit? }] label
  *   List         label rows keyOf children(row)              ListRow  lead? title detail? end? href? onPress? selected?
  *   Table        caption columns[{ key, header, cell, numeric?, rowHeader?, sorted?, onSort? }] rows keyOf selectedKey?
  *   KeyValueList of KeyValueRow name value mono? strong?
@@ -25,47 +25,37 @@
  *   Key, Time iso form?, Markdown text linkify?, Logo
  *   counted, countWords                                      `3 copies`, `no copies`
  */
-export { Text, type TextProps } from './text';
-export { Stack, Row, type RowProps, type StackProps } from './stack';
+export { Text } from './text';
+export { Stack, Row } from './stack';
 export { Card } from './card';
-export { Link, type LinkProps } from './link';
-export { Icon, type IconProps, type IconShape } from './icon';
-export { Button, type ButtonKind, type ButtonProps } from './button';
-export { IconButton, type IconButtonProps } from './icon-button';
-export { CopyButton, type CopyButtonProps } from './copy-button';
-export { Caption, type CaptionProps } from './caption';
-export { Tabs, type TabItem, type TabsProps } from './tabs';
-export { Segment, type SegmentProps } from './segment';
+export { Link } from './link';
+export { Icon, type IconShape } from './icon';
+export { Button, type ButtonKind } from './button';
+export { IconButton } from './icon-button';
+export { CopyButton } from './copy-button';
+export { Caption } from './caption';
+export { Tabs } from './tabs';
+export { Segment } from './segment';
 export { Choice, type ChoiceOption, type ChoiceProps } from './choice';
-export { Banner, type BannerKind, type BannerProps } from './banner';
-export { BothTexts, type BothTextsProps } from './both-texts';
-export { Mark, type MarkProps } from './mark';
-export { Toast, type ToastProps } from './toast';
-export {
-  IssueList,
-  IssueRow,
-  issuePlace,
-  type IssueListProps,
-  type IssueRowProps,
-  type IssueView,
-} from './issue-list';
-export { StageScale, stagePercent, uploadStages, type StageScaleProps } from './stage-scale';
+export { Banner } from './banner';
+export { BothTexts } from './both-texts';
+export { Mark } from './mark';
+export { IssueList, type IssueView } from './issue-list';
+export { StageScale } from './stage-scale';
 export { counted, countWords } from './count-words';
-export { Empty, type EmptyProps } from './empty';
+export { Empty } from './empty';
 export { Loading } from './loading';
-export { NothingHere, ReadView, type ReadState, type ReadViewProps } from './read-view';
-export { Person, initials, type PersonProps } from './person';
-export { Status, type StatusName } from './status';
-export { CheckList, CheckRow, type CheckResult, type CheckRowProps } from './check-row';
-export { Tally, type TallyCell } from './tally';
-export { List, ListRow, type ListProps, type ListRowProps } from './list';
-export { Table, type TableColumn, type TableProps } from './table';
-export { KeyValueList, KeyValueRow, type KeyValueRowProps } from './key-value';
-export { Dialog, type DialogProps } from './dialog';
-export { Sheet, type SheetProps } from './sheet';
+export { NothingHere, ReadView, type ReadState } from './read-view';
+export { Person } from './person';
+export { Status } from './status';
+export { CheckList } from './check-row';
+export { List, ListRow } from './list';
+export { Table, type TableColumn } from './table';
+export { KeyValueList, KeyValueRow } from './key-value';
+export { Dialog } from './dialog';
+export { Sheet } from './sheet';
 export { Key } from './key';
-export { Time, type TimeProps } from './time';
-export { fullTimeWords, timeWords, type TimeForm } from './time-words';
-export { Markdown, type MarkdownProps } from './markdown';
+export { Time } from './time';
+export { Markdown } from './markdown';
 export type { Linkify } from './markdown-parts';
 export { Logo } from './logo';

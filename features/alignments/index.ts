@@ -1,2 +1,1 @@
-export { applyToAlignment, applyToAlignments, type AlignmentWithRows } from './apply-alignment-event';
-export { useAlignment, useAlignments } from './use-alignments';
+export { useAlignments } from './use-alignments';

@@ -1,3 +1,3 @@
-export { usePerson, useSession } from '@/client/session';
-export { useSignIn, useSignOut, useSignUp } from './use-auth';
+export { usePerson } from '@/client/session';
+export { useSignOut } from './use-auth';
 export { SignedInOnly } from './components/signed-in-only';

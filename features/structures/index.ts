@@ -1,2 +1,1 @@
-export { applyToStructure, applyToStructures } from './apply-structure-event';
-export { useStructure, useStructures } from './use-structures';
+export { useStructures } from './use-structures';

@@ -2,5 +2,5 @@ export { Authenticate, type AccessClaims } from './authenticate';
 export { errorHandler } from './error-handler';
 export { securityHeaders } from './headers';
 export { originAllowed } from './origin';
-export { Routes, type RegisteredRoute } from './route';
+export { Routes } from './route';
 export { serveClient } from './static-client';

@@ -34,8 +34,6 @@ export function chemistryOfLetter(letter: string): ResidueChemistry {
 export const STANDARD_LETTERS = 'ARNDCQEGHILKMFPSTWYV';
 
 /** Gap characters a row may hold: `-`, `.` (Stockholm and insert padding) and `~` (outer gap of some exports). */
-export const GAP_CHARACTERS = '-.~';
-
 export function isGap(character: string): boolean {
   return character === '-' || character === '.' || character === '~';
 }

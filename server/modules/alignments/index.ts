@@ -1,4 +1,4 @@
-export { addAlignment, type NewAlignment, type NewAlignmentRow } from './alignment.adding';
+export { addAlignment } from './alignment.adding';
 export { AlignmentQueries } from './alignment.queries';
 export { AlignmentRevision } from './alignment-revision.entity';
 export { AlignmentRow } from './alignment-row.entity';

@@ -7,6 +7,6 @@ export { furnishFamilies } from './furnish-families';
 export { NumberingSegment } from './numbering-segment.entity';
 export { Numbering } from './numbering.entity';
 export { addProteins, type NewProtein } from './protein.adding';
-export { ProteinDirectory, type NumberedProtein, type ProteinText } from './protein.directory';
+export { ProteinDirectory, type NumberedProtein } from './protein.directory';
 export { Protein } from './protein.entity';
 export { ProteinService } from './protein.service';

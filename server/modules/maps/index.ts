@@ -4,6 +4,6 @@ export { MapQueries } from './map.queries';
 export { addMapRoutes } from './map.routes';
 export { MapSegment } from './map-segment.entity';
 export { DecisionPlanner } from './map.planner';
-export { MapService, type SettleUpload } from './map.service';
-export { type ChainMapper, type MappedChain } from './chain-mapper';
+export { MapService } from './map.service';
+export type { MappedChain } from './chain-mapper';
 export { ResidueMap } from './residue-map.entity';

@@ -3,4 +3,4 @@ export { CopyQueries } from './copy.queries';
 export { LocateQueries } from './locate.queries';
 export { PassportQueries } from './passport.queries';
 export { addResidueRoutes } from './residue.routes';
-export { SiteQueries, type Site, type SiteMember } from './site.queries';
+export { SiteQueries } from './site.queries';

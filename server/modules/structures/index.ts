@@ -5,4 +5,4 @@ export { StructureRevision } from './structure-revision.entity';
 export { Structure } from './structure.entity';
 export { StructureQueries, type MapReader } from './structure.queries';
 export { addStructureRoutes } from './structure.routes';
-export { addStructure, type NewChain, type NewStructure } from './structure.adding';
+export { addStructure, type NewChain } from './structure.adding';

@@ -1,5 +1,5 @@
 export { Message } from './message.entity';
-export { SubjectDirectory, type ResolvedSubject, type SubjectResolver } from './subject.directory';
+export { SubjectDirectory, type SubjectResolver } from './subject.directory';
 export { Thread } from './thread.entity';
 export { ThreadQueries } from './thread.queries';
 export { addThreadRoutes } from './thread.routes';

@@ -5,4 +5,4 @@ export { UploadQueries } from './upload.queries';
 export { addUploadRoutes } from './upload.routes';
 export { uploadJobKinds } from './upload-jobs';
 export { UploadService } from './upload.service';
-export { UploadStates, type UploadResult } from './upload.states';
+export { UploadStates } from './upload.states';

@@ -18,10 +18,6 @@ const USAGE: Record<
   yeast: { tables: [1], shares: YEAST_CODON_SHARES, label: 'S. cerevisiae, nuclear' },
 };
 
-export function hostLabel(host: Host): string {
-  return USAGE[host].label;
-}
-
 export interface CodonOption {
   codon: string;
   /** Share among its synonyms in the host, 0–1; null without a table for this genetic code. */
