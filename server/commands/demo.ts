@@ -7,6 +7,7 @@ import { newId } from '../lib/new-id';
 import { withRequestContext } from '../lib/request-context';
 import { Family, Protein } from '../modules/families';
 import { ProjectMember } from '../modules/projects';
+import { TeamMember } from '../modules/teams';
 
 const loadedMark = 'demo.loaded';
 
@@ -74,12 +75,16 @@ class DemoLoader {
     return withRequestContext({ requestId: 'demo', actorId, clientRequest: null }, () => act(actorId));
   }
 
+  /** Nobody sees what a start that was cut off left; no real person had a way in before the demo was whole. */
   private async forgetHalfLoaded(): Promise<void> {
     const ids = [...this.ids.values()];
     const [actorId] = ids;
     if (!actorId) return;
     await this.container.unitOfWork.write({ projectId: null, actorId }, async (unit) => {
-      for (const personId of ids) await unit.manager.delete(ProjectMember, { personId });
+      for (const personId of ids) {
+        await unit.manager.delete(ProjectMember, { personId });
+        await unit.manager.delete(TeamMember, { personId });
+      }
     });
   }
 

@@ -24,6 +24,8 @@ export interface ServerProcess {
   readonly pid: number;
   /** Everything it has printed so far, over all restarts. */
   readonly output: string;
+  /** Starts it (again) on the same port, without waiting. */
+  launch(): void;
   /** Resolves when it answers; rejects when it ended instead. */
   ready(): Promise<void>;
   /** SIGKILL: nothing is finished, nothing said goodbye. Does nothing when it does not run. */
