@@ -1,8 +1,8 @@
 import Svg, { Circle, Path } from 'react-native-svg';
 import { color } from '@/components/theme';
-import type { Chemistry } from './amino-acid-words.data';
+import type { ResidueChemistry } from '@/shared/sequence/alphabet';
 
-const strokes: Partial<Record<Chemistry, string>> = {
+const strokes: Partial<Record<ResidueChemistry, string>> = {
   acidic: 'M2 4h8',
   basic: 'M2.5 4h7M6 .5v7',
   aliphatic: 'M0 5h12',
@@ -12,7 +12,7 @@ const strokes: Partial<Record<Chemistry, string>> = {
 };
 
 /** The second sign of a residue's chemistry, which stays when tints are off or the print is grey. */
-export function ChemistryCue({ chemistry }: { chemistry: Chemistry }) {
+export function ChemistryCue({ chemistry }: { chemistry: ResidueChemistry }) {
   return (
     <Svg width={12} height={8} viewBox="0 0 12 8" aria-hidden>
       {chemistry === 'polar' ? <Circle cx={6} cy={4} r={1.6} fill={color.inkSoft} /> : null}

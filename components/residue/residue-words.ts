@@ -1,5 +1,5 @@
 import type { ResidueLabel } from '@/shared/contracts/common';
-import { aminoAcidWords, type AminoAcidWords } from './amino-acid-words.data';
+import { aminoAcid, type ResidueChemistry } from '@/shared/sequence/alphabet';
 
 export type EvidenceEdge = 'observed' | 'equivalence' | 'predicted';
 export type GradeName = 'none' | 'weak' | 'fair' | 'good' | 'strong';
@@ -31,8 +31,19 @@ export function plateWords({ family, part, letter, label, numbering, organism }:
   return { family, part, code: letter, number: label, numbering, organism };
 }
 
+export interface AminoAcidWords {
+  /** `glutamate` */
+  name: string;
+  /** `Glu` */
+  threeLetter: string;
+  /** Null where the letter stands for more than one residue, or for none. */
+  chemistry: ResidueChemistry | null;
+}
+
 export function wordsForCode(code: string): AminoAcidWords {
-  return aminoAcidWords[code.toUpperCase()] ?? { name: `residue ${code}`, threeLetter: code };
+  const acid = aminoAcid(code);
+  if (!acid) return { name: `residue ${code}`, threeLetter: code, chemistry: null };
+  return { name: acid.name.toLowerCase(), threeLetter: acid.code, chemistry: acid.chemistry };
 }
 
 /** `E59`, or `E59Q` for a planned change. */

@@ -1,6 +1,6 @@
-/** Chemistry of a side chain, as the alignment tints it; `unknown` for letters that stand for several. */
+/** Chemistry of a side chain, as a sequence is tinted. */
 export type ResidueChemistry =
-  'acidic' | 'basic' | 'polar' | 'aliphatic' | 'aromatic' | 'glycine' | 'proline' | 'cysteine' | 'unknown';
+  'acidic' | 'basic' | 'polar' | 'aliphatic' | 'aromatic' | 'glycine' | 'proline' | 'cysteine';
 
 export interface AminoAcid {
   letter: string;
@@ -8,7 +8,8 @@ export interface AminoAcid {
   code: string;
   /** `Glutamate`, the charged name where the side chain is charged at neutral pH. */
   name: string;
-  chemistry: ResidueChemistry;
+  /** Null for letters that stand for several. */
+  chemistry: ResidueChemistry | null;
   /** Stands for more than one amino acid: B, Z, J, X. */
   ambiguous: boolean;
 }
@@ -17,7 +18,7 @@ const row = (
   letter: string,
   code: string,
   name: string,
-  chemistry: ResidueChemistry,
+  chemistry: ResidueChemistry | null,
   ambiguous = false,
 ): AminoAcid => ({ letter, code, name, chemistry, ambiguous });
 
@@ -47,10 +48,10 @@ export const AMINO_ACIDS: readonly AminoAcid[] = [
   row('W', 'Trp', 'Tryptophan', 'aromatic'),
   row('Y', 'Tyr', 'Tyrosine', 'aromatic'),
   row('V', 'Val', 'Valine', 'aliphatic'),
-  row('B', 'Asx', 'Aspartate or asparagine', 'unknown', true),
-  row('Z', 'Glx', 'Glutamate or glutamine', 'unknown', true),
-  row('J', 'Xle', 'Leucine or isoleucine', 'unknown', true),
-  row('X', 'Xaa', 'Unknown residue', 'unknown', true),
+  row('B', 'Asx', 'Aspartate or asparagine', null, true),
+  row('Z', 'Glx', 'Glutamate or glutamine', null, true),
+  row('J', 'Xle', 'Isoleucine or leucine', null, true),
+  row('X', 'Xaa', 'Unknown residue', null, true),
   row('U', 'Sec', 'Selenocysteine', 'cysteine'),
   row('O', 'Pyl', 'Pyrrolysine', 'basic'),
 ];

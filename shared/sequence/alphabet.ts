@@ -26,10 +26,6 @@ export function nameOfLetter(letter: string): string {
   return letter === '*' ? 'Stop' : (aminoAcid(letter)?.name ?? letter);
 }
 
-export function chemistryOfLetter(letter: string): ResidueChemistry {
-  return aminoAcid(letter)?.chemistry ?? 'unknown';
-}
-
 /** The 20 standard letters. */
 export const STANDARD_LETTERS = 'ARNDCQEGHILKMFPSTWYV';
 

@@ -13,12 +13,6 @@ const PDB_RECORDS = new Set(
 export type ContentKind =
   'empty' | 'binary' | 'gzip' | 'pdb' | 'mmcif' | 'fasta' | 'stockholm' | 'blocks' | 'markup' | 'unknown';
 
-/** The kind of a coordinate file from its content, whatever its name: `pdb`, `mmcif`, or null for anything else. */
-export function sniffStructure(bytes: Uint8Array): 'pdb' | 'mmcif' | null {
-  const kind = sniffContent(bytes);
-  return kind === 'pdb' || kind === 'mmcif' ? kind : null;
-}
-
 /** The kind of a file's content. Only the beginning is looked at (16 KiB, 150 lines), but for NUL bytes all of it. */
 export function sniffContent(bytes: Uint8Array): ContentKind {
   if (bytes[0] === 0x1f && bytes[1] === 0x8b) return 'gzip';

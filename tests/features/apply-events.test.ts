@@ -7,7 +7,6 @@ import {
 } from '@/features/annotations/apply-annotation-event';
 import { applyToAuditPages } from '@/features/audit/apply-audit-event';
 import { applyToFamilies, applyToProtein, applyToProteins } from '@/features/families/apply-family-event';
-import { applyToMap } from '@/features/maps/apply-map-event';
 import { applyToMutant, applyToMutants } from '@/features/plans/apply-plan-event';
 import { applyToMembers, applyToOwnProject, applyToProjects } from '@/features/projects/apply-project-event';
 import { applyToLocated, applyToPassport } from '@/features/residues/apply-residue-event';
@@ -171,7 +170,6 @@ describe('structures and maps', () => {
     const after = applyToStructure(held, fact('map.decided', decided));
     expect(after).toEqual({ ...held, chains: [decided, held.chains[1]], waiting: 1 });
     expect(applyToStructure(after as typeof held, fact('map.decided', decided))).toBe(after);
-    expect(applyToMap(chainMap(), fact('map.decided', decided))).toEqual(decided);
   });
 
   test('how many chains wait is told without a new version, and the last word counts', () => {

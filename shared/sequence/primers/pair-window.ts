@@ -111,29 +111,6 @@ export function findWindows(
     .map(({ window }) => window);
 }
 
-/**
- * The window of at least `arm` bases on each side of the codons, each side lengthened until it ends with G or C
- * (not beyond `longest` bases an arm); null where the construct ends before.
- */
-export function growWindow(
-  construct: PrimerConstruct,
-  exchanges: readonly CodonExchange[],
-  arm: number,
-  longest = PAIR_LIMITS.longestBases,
-): PairWindow | null {
-  let before = arm;
-  let behind = arm;
-  for (;;) {
-    const window = pairWindow(construct, exchanges, before, behind);
-    if (!window || Math.max(before, behind) > longest) return null;
-    const startsStrong = isStrong(window.changed[0]);
-    const endsStrong = isStrong(window.changed[window.length - 1]);
-    if (startsStrong && endsStrong) return window;
-    if (!startsStrong) before += 1;
-    if (!endsStrong) behind += 1;
-  }
-}
-
 /** Lowest index a window covers on the strand as given, from 0. */
 export function windowStart(construct: PrimerConstruct, window: PairWindow): number {
   const { along, length } = window;

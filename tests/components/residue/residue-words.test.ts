@@ -1,4 +1,3 @@
-import { aminoAcidWords } from '@/components/residue/amino-acid-words.data';
 import { shortLabel, spokenResidue, wordsForCode } from '@/components/residue/residue-words';
 
 const residue = { family: 'c', code: 'E', number: '59', numbering: 'mature', organism: 'Orvella tarda' };
@@ -40,7 +39,7 @@ test('the twenty letters carry the published three-letter codes', () => {
       ' ',
     );
   for (let at = 0; at < published.length; at += 2) {
-    expect(aminoAcidWords[published[at] ?? '']?.threeLetter).toBe(published[at + 1]);
+    expect(wordsForCode(published[at] ?? '').threeLetter).toBe(published[at + 1]);
   }
 });
 
@@ -58,6 +57,6 @@ test('each of the twenty has its class of chemistry', () => {
   };
   for (const [chemistry, letters] of Object.entries(classes)) {
     for (const letter of letters)
-      expect([letter, aminoAcidWords[letter]?.chemistry]).toEqual([letter, chemistry]);
+      expect([letter, wordsForCode(letter).chemistry]).toEqual([letter, chemistry]);
   }
 });

@@ -11,7 +11,7 @@ import { meltingCelsius } from '@/shared/sequence/primers/melting';
 import { DEFAULT_MELTING_CONDITIONS } from '@/shared/sequence/primers/melting-conditions';
 import { draftWindow, proveDraft } from '@/shared/sequence/primers/pair-design';
 import { DEFAULT_PAIR_SETTINGS } from '@/shared/sequence/primers/pair-settings';
-import { growWindow } from '@/shared/sequence/primers/pair-window';
+import { pairWindow, type PairWindow } from '@/shared/sequence/primers/pair-window';
 import { readFixtureJson, readFixtureText } from '../../support/read-fixture';
 
 // An invented circular construct; each product was built and compared with Biopython 1.80 (source field of the file).
@@ -63,6 +63,22 @@ function changesOf(mutation: string, coding: Coding): CodingChange[] {
 const coding = codingOf(file.construct, file.orfStart0 + 1);
 const construct = preparePrimerConstruct(file.construct, coding);
 
+/** Design rule of the file: 15 bases on each side of the codon, each side lengthened until its end is G or C. */
+function windowOfTheFile(along: number, codonTo: string): PairWindow | null {
+  const isStrong = (base: string | undefined) => base === 'G' || base === 'C';
+  let before = 15;
+  let behind = 15;
+  for (;;) {
+    const window = pairWindow(construct, [{ along, codonTo }], before, behind);
+    if (!window) return null;
+    const startsStrong = isStrong(window.changed[0]);
+    const endsStrong = isStrong(window.changed[window.length - 1]);
+    if (startsStrong && endsStrong) return window;
+    if (!startsStrong) before += 1;
+    if (!endsStrong) behind += 1;
+  }
+}
+
 test('the worked construct encodes its protein', () => {
   expect(coding.protein).toBe(file.protein);
   expect(coding.length).toBe(file.orfEnd0_afterStop - file.orfStart0);
@@ -71,8 +87,7 @@ test('the worked construct encodes its protein', () => {
 describe.each(file.cases)('worked mutation $short', (worked) => {
   const pair = worked.complementaryPair;
   const along = construct.codingStart + 3 * (worked.codonNumber - 1);
-  // Design rule of the file: 15 bases on each side of the codon, lengthened until the end is G or C.
-  const window = growWindow(construct, [{ along, codonTo: worked.newCodon }], 15);
+  const window = windowOfTheFile(along, worked.newCodon);
   const changes = changesOf(worked.short, coding);
   const change = changes[0];
   const draft =

@@ -1,6 +1,6 @@
 import {
+  aminoAcid,
   AMINO_ACIDS,
-  chemistryOfLetter,
   codeOfLetter,
   compareLetters,
   isGap,
@@ -25,12 +25,13 @@ test('letters and codes are those of the nomenclature, both ways, in any case', 
 });
 
 test('every standard letter has a chemistry, ambiguous ones have none', () => {
-  const of = (chemistry: string) => [...STANDARD_LETTERS].filter((a) => chemistryOfLetter(a) === chemistry);
+  const of = (chemistry: string) =>
+    [...STANDARD_LETTERS].filter((a) => aminoAcid(a)?.chemistry === chemistry);
   expect(of('acidic').join('')).toBe('DE');
   expect(of('basic').join('')).toBe('RHK');
   expect(of('aromatic').join('')).toBe('FWY');
-  expect(of('unknown')).toEqual([]);
-  expect(['B', 'Z', 'J', 'X'].map(chemistryOfLetter)).toEqual(Array(4).fill('unknown'));
+  expect([...STANDARD_LETTERS].filter((a) => !aminoAcid(a)?.chemistry)).toEqual([]);
+  expect(['B', 'Z', 'J', 'X'].map((a) => aminoAcid(a)?.chemistry)).toEqual(Array(4).fill(null));
 });
 
 test('B, Z, J and X are never identical and never a mismatch (handbook 3.1)', () => {

@@ -1,16 +1,16 @@
-import { sniffContent, sniffStructure } from '@/shared/structure/sniff';
+import { sniffContent } from '@/shared/structure/sniff';
 import { structureBytes, structureFiles } from '@/tests/support/structure-fixtures';
 
 const bytes = (text: string): Uint8Array => new TextEncoder().encode(text);
 
 it.each(structureFiles)('knows %s by its content', (file) => {
-  expect(sniffStructure(structureBytes(file))).toBe('pdb');
+  expect(sniffContent(structureBytes(file))).toBe('pdb');
 });
 
 it('knows mmCIF with and without a block name, whatever stands above it', () => {
-  expect(sniffStructure(bytes('data_1ABC\n#\n_entry.id 1ABC\n'))).toBe('mmcif');
-  expect(sniffStructure(bytes('# comment\n\nloop_\n_atom_site.group_PDB\n'))).toBe('mmcif');
-  expect(sniffStructure(bytes('\ufeffDATA_x\n'))).toBe('mmcif');
+  expect(sniffContent(bytes('data_1ABC\n#\n_entry.id 1ABC\n'))).toBe('mmcif');
+  expect(sniffContent(bytes('# comment\n\nloop_\n_atom_site.group_PDB\n'))).toBe('mmcif');
+  expect(sniffContent(bytes('\ufeffDATA_x\n'))).toBe('mmcif');
 });
 
 it.each([
@@ -24,11 +24,10 @@ it.each([
   ['', 'empty'],
   ['a\0b', 'binary'],
 ])('takes %j for no coordinates', (text, kind) => {
-  expect(sniffStructure(bytes(text))).toBeNull();
   expect(sniffContent(bytes(text))).toBe(kind);
 });
 
 it('knows a PDB file of atom lines alone, a serial run into the record name included', () => {
   const line = '111757  CG3 VAL B  52       7.588  -6.386  43.856  1.00 23.53           C';
-  expect(sniffStructure(bytes(`ATOM ${line}\n`))).toBe('pdb');
+  expect(sniffContent(bytes(`ATOM ${line}\n`))).toBe('pdb');
 });
