@@ -80,7 +80,7 @@ interface Row {
   send?: (asker: Asker) => Promise<{ status: number; body: object }>;
 }
 
-const of = (more: object = {}) => ({ params: { projectId: full.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: full.projectId, ...more } });
 const protein = () => full.stage.protein('ATPE2_ACEWO_4BEM').id;
 const residue = () => ({ proteinId: protein(), residueIndex: 61 });
 const content = {

@@ -31,7 +31,7 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 const carboxylate = () => ({ proteinId: stage.protein('ATPE2_ACEWO_4BEM').id, residueIndex: 61 });
 
 /** Puts `times` of everything into the project, at the residues that are read. */

@@ -25,7 +25,7 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 const at = (row: Parameters<Stage['protein']>[0], residueIndex: number) => ({
   proteinId: stage.protein(row).id,
   residueIndex,

@@ -63,7 +63,7 @@ const difference = (before: Counts, after: Counts): Counts =>
     }),
   );
 
-const of = (more: object = {}) => ({ params: { projectId: full.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: full.projectId, ...more } });
 const lead = () => full.stage.lead;
 const content = {
   kind: 'ion site',
@@ -167,7 +167,7 @@ interface Outcome {
 
 async function run(
   { endpoint, input }: (typeof acts)[number],
-  at: number,
+  at: number | 'COMMIT',
   fault: Fault | null,
   key?: string,
 ) {
@@ -199,7 +199,7 @@ describe.each(acts.map((act) => [act.endpoint.name, act] as const))('%s', (_, ac
   const places = (): number[] => {
     expect(clean.status).toBe(act.endpoint.status);
     expect(statements.at(-1)).toBe('COMMIT');
-    const step = isFull ? 1 : Math.ceil(statements.length / 8);
+    const step = isFull ? 1 : Math.ceil(statements.length / 5);
     const all = statements.map((_, at) => at + 1);
     return all.filter((at) => at % step === 1 % step || at === statements.length);
   };

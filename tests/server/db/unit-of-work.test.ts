@@ -56,7 +56,7 @@ test('events are numbered without gaps from the first, whatever was written', as
   );
 });
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 const content = {
   kind: 'ion site' as const,
   text: 'Carries the ion.',

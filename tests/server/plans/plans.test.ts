@@ -17,7 +17,7 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 const proteinId = () => stage.protein('ATPE_VIBCH').id;
 const bases = codingBases('VIBCH_atpE');
 /** The row of the alignment, without gaps. */

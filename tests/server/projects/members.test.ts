@@ -14,7 +14,7 @@ beforeEach(async () => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId, ...more } });
 const add = (email: string, role: 'reader' | 'lead' = 'reader') =>
   lead.ask(projects.addMember, { ...of(), body: { email, role } });
 

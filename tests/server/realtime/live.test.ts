@@ -18,7 +18,7 @@ afterEach(() => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 async function open(token: unknown, options?: Parameters<typeof LiveClient.open>[2]): Promise<LiveClient> {
   const client = await LiveClient.open(server, token, options);
   opened.push(client);

@@ -14,7 +14,7 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const of = (more: object = {}) => ({ params: { projectId: stage.projectId, ...more } });
+const of = <More extends object>(more = {} as More) => ({ params: { projectId: stage.projectId, ...more } });
 const residue = (residueIndex: number): Subject => ({
   kind: 'residue',
   proteinId: stage.protein('ATPE_ECOLI').id,
