@@ -6,6 +6,14 @@ import { errorHandler, securityHeaders, serveClient } from './http';
 import type { Logger } from './lib/log';
 import { notFound } from './lib/problem';
 
+/**
+ * Half a character (a cut emoji) is no text the database takes: the sign for "unreadable" stands in its place.
+ * Walking every value also refuses what is nested too deep to be walked.
+ */
+function mendText(_key: string, value: unknown): unknown {
+  return typeof value === 'string' ? value.replace(/\p{Surrogate}/gu, '\uFFFD') : value;
+}
+
 /** Everything around the routes: ids, log, headers, body limits, the client's files, errors. */
 export function createApp(
   api: Router,
@@ -39,7 +47,7 @@ export function createApp(
     response.set('Cache-Control', 'no-store');
     next();
   });
-  app.use('/api/v1', express.json({ limit: '2mb', strict: true }), api);
+  app.use('/api/v1', express.json({ limit: '2mb', strict: true, reviver: mendText }), api);
   app.use('/api', () => {
     throw notFound('address');
   });

@@ -9,7 +9,10 @@ export const givenName = z
   .trim()
   .min(1, 'Write a name.')
   .max(120, 'At most 120 characters.')
-  .regex(/^[^\p{Cc}\u2028\u2029]*$/u, 'A name is one line without control characters.');
+  .regex(/^[^\p{Cc}\u2028\u2029]*$/u, 'A name is one line without control characters.')
+  // Signs that turn the writing direction would let a name look like another one.
+  .regex(/^[^\u202a-\u202e\u2066-\u2069]*$/u, 'A name is without signs that turn the writing direction.')
+  .regex(/[\p{L}\p{N}\p{P}\p{S}]|^$/u, 'Write a name that can be seen.');
 export const version = z.int().min(1);
 export const eventNumber = z.int().min(0);
 export const indexFromZero = z.int().min(0);
