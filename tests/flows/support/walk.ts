@@ -148,3 +148,16 @@ export async function openResidue(page: Page, organism: string, number: number, 
   await button(page, 'Go').click();
   await page.waitForURL(/\/residues\//);
 }
+
+/** Looks again until it holds: what a screen shows comes in its own time. */
+export async function eventually(check: () => Promise<void>, withinMilliseconds = 10_000): Promise<void> {
+  const until = Date.now() + withinMilliseconds;
+  for (;;) {
+    try {
+      return await check();
+    } catch (error) {
+      if (Date.now() > until) throw error;
+      await new Promise((done) => setTimeout(done, 50));
+    }
+  }
+}
