@@ -29,4 +29,5 @@ export const Text = element('text');
 export const TSpan = element('tspan');
 export const Use = element('use');
 
-export default Svg;
+// Whatever is imported without a name is the whole drawing.
+export default element('svg');

@@ -1,4 +1,4 @@
-// Small helpers around other processes: find a program, run one, wait for one to go.
+// What is done with other processes: find a program, run one, wait for one to go.
 import { spawn, spawnSync } from 'node:child_process';
 import { accessSync, constants, readdirSync, readFileSync } from 'node:fs';
 import path from 'node:path';

@@ -98,7 +98,7 @@ export class UploadService {
   }
 }
 
-/** `c_small_mafft.afa` names an alignment c_small_mafft. */
+/** `c_small.afa` names an alignment c_small. */
 function nameFrom(fileName: string): string {
   const base = fileName.replace(/(\.(gz|[A-Za-z0-9]{1,8}))+$/, '').trim() || fileName;
   return [...base].slice(0, longestName).join('').trim();
