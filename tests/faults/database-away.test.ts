@@ -4,7 +4,7 @@ import { mkdtemp, rm } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { startDatabase } from '../../scripts/lib/database.mjs';
-import { isFull, pause, report, until } from './support/size';
+import { isFull, pause, report, until } from '@/tests/support/size';
 import {
   eventsAfter,
   openWorkbench,

@@ -17,7 +17,7 @@ import {
 import { createFreshDatabase } from '@/tests/support/fresh-database';
 import { ask, mustAsk } from '@/tests/support/person';
 import { demoPassword, launchServerProcess } from '@/tests/support/server-process';
-import { isFull, report, until } from './support/size';
+import { isFull, report, until } from '@/tests/support/size';
 
 /** Killed when the half-loaded demo has come so far: the name of a table and how many rows it has by then. */
 const moments: [table: string, rows: number][] = isFull

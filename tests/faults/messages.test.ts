@@ -1,8 +1,8 @@
 // Two people write to each other while lines are cut, replies are lost, pages are loaded anew and the server is killed.
 import { ClientPage, Device } from './support/client-page';
 import { FaultyLine } from './support/faulty-line';
-import { between, seeded } from './support/random';
-import { isFull, pause, report, until } from './support/size';
+import { between, seeded } from '@/tests/support/random';
+import { isFull, pause, report, until } from '@/tests/support/size';
 import {
   eventsAfter,
   openWorkbench,

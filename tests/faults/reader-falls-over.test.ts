@@ -2,8 +2,8 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { connect } from 'node:net';
 import path from 'node:path';
-import { between, seeded } from './support/random';
-import { isFull, pause, report, until } from './support/size';
+import { between, seeded } from '@/tests/support/random';
+import { isFull, pause, report, until } from '@/tests/support/size';
 import { openWorkbench, shareProject, type SharedProject, type Workbench } from './support/workbench';
 import { alignments, families, uploads } from '@/shared/contracts';
 

@@ -3,8 +3,8 @@ import { createHash, randomUUID } from 'node:crypto';
 import { readFileSync, readdirSync, utimesSync } from 'node:fs';
 import { connect } from 'node:net';
 import path from 'node:path';
-import { between, seeded } from './support/random';
-import { isFull, pause, report, until } from './support/size';
+import { between, seeded } from '@/tests/support/random';
+import { isFull, pause, report, until } from '@/tests/support/size';
 import {
   eventsAfter,
   openWorkbench,

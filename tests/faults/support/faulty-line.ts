@@ -1,6 +1,6 @@
 // The line between one person and the server: TCP that can be slow, be cut, lose a request or lose a reply.
 import net, { type AddressInfo, type Socket } from 'node:net';
-import { between } from './random';
+import { between } from '@/tests/support/random';
 
 export interface LineCounts {
   cuts: number;

@@ -12,3 +12,9 @@ export function seeded(seed: number): () => number {
 /** A whole number from `least` up to and with `most`. */
 export const between = (random: () => number, least: number, most: number): number =>
   least + Math.floor(random() * (most - least + 1));
+
+export function pick<Value>(random: () => number, values: readonly Value[]): Value {
+  const value = values[Math.floor(random() * values.length)];
+  if (value === undefined) throw new Error('There is nothing to pick from.');
+  return value;
+}
