@@ -1,14 +1,8 @@
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { Row } from '@/components/ui';
-import type { ResidueLabel } from '@/shared/contracts/common';
 import type { Mutant } from '@/shared/contracts/plans';
 
 type Mutation = Mutant['mutations'][number];
-
-/** The words of a plate for a residue of the contract. */
-export function plateWords({ family, part, letter, label, numbering, organism }: ResidueLabel) {
-  return { family, part, code: letter, number: label, numbering, organism };
-}
 
 const keyOf = ({ residue }: Mutation) => `${residue.proteinId}:${residue.residueIndex}`;
 

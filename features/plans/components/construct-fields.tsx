@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { Controller, type UseFormReturn } from 'react-hook-form';
 import type { z } from 'zod';
-import { FileDrop, Select, TextArea, TextInput } from '@/components/form';
+import { BoundArea, BoundText, FileDrop, Select, TextInput } from '@/components/form';
 import { Segment, Stack, Text } from '@/components/ui';
 import type { newConstructBody } from '@/shared/contracts/plans';
 import { GENETIC_CODE_IDS } from '@/shared/sequence/construct/genetic-code';
@@ -23,19 +23,7 @@ export function ConstructFields({ projectId, form }: ConstructFieldsProps) {
   const { control } = form;
   return (
     <Stack gap={16}>
-      <Controller
-        control={control}
-        name="name"
-        render={({ field, fieldState }) => (
-          <TextInput
-            label="Name"
-            hint="As the lab calls it."
-            required
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
-      />
+      <BoundText control={control} name="name" label="Name" hint="As the lab calls it." required />
       <Controller
         control={control}
         name="proteinId"
@@ -127,20 +115,14 @@ function DnaField({ form }: Pick<ConstructFieldsProps, 'form'>) {
   };
   return (
     <Stack gap={8}>
-      <Controller
+      <BoundArea
         control={form.control}
         name="dna"
-        render={({ field, fieldState }) => (
-          <TextArea
-            label="DNA"
-            hint="Paste FASTA or plain bases: the whole plasmid if there is one."
-            rows={8}
-            mono
-            required
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="DNA"
+        hint="Paste FASTA or plain bases: the whole plasmid if there is one."
+        rows={8}
+        mono
+        required
       />
       <FileDrop
         title="Or read it from a text file"

@@ -1,5 +1,5 @@
 import { Banner, Button } from '@/components/ui';
-import type { FormDraft } from '../use-form-draft';
+import type { FormDraft } from '@/client/use-form-draft';
 
 /** The same form was filled in otherwise in another tab: both are kept until one is taken. */
 export function DraftElsewhere<Values>({ draft }: { draft: FormDraft<Values> }) {

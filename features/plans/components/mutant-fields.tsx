@@ -1,6 +1,6 @@
 import { Controller, useWatch, type UseFormReturn } from 'react-hook-form';
 import type { z } from 'zod';
-import { TextArea, TextInput } from '@/components/form';
+import { BoundArea, BoundText } from '@/components/form';
 import { Stack } from '@/components/ui';
 import { useFamilies, useProtein } from '@/features/families';
 import type { newMutantBody } from '@/shared/contracts/plans';
@@ -53,20 +53,15 @@ export function MutantFields({ projectId, form, host, onHost }: MutantFieldsProp
         )}
       />
       <Stack gap={8}>
-        <Controller
+        <BoundText
           control={control}
           name="changes"
-          render={({ field, fieldState }) => (
-            <TextInput
-              label="Change"
-              hint={numbering}
-              placeholder="E62Q"
-              mono
-              required
-              {...field}
-              error={wrong || fieldState.error?.message}
-            />
-          )}
+          label="Change"
+          hint={numbering}
+          placeholder="E62Q"
+          mono
+          required
+          error={wrong}
         />
         {view && protein && family ? (
           <ChangeCheck
@@ -97,18 +92,12 @@ export function MutantFields({ projectId, form, host, onHost }: MutantFieldsProp
         )}
       />
       {constructId ? <HostSelect value={host} onChange={onHost} /> : null}
-      <Controller
+      <BoundArea
         control={control}
         name="reason"
-        render={({ field, fieldState }) => (
-          <TextArea
-            label="What it is for"
-            hint="Why this change; it stands with the mutant."
-            rows={3}
-            {...field}
-            error={fieldState.error?.message}
-          />
-        )}
+        label="What it is for"
+        hint="Why this change; it stands with the mutant."
+        rows={3}
       />
     </Stack>
   );

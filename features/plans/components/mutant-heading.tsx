@@ -1,10 +1,9 @@
 import ArrowRight from 'lucide-react-native/icons/arrow-right';
-import { Plate } from '@/components/residue';
+import { Plate, plateWords } from '@/components/residue';
 import { face } from '@/components/theme';
-import { Icon, Row, Stack, Text } from '@/components/ui';
+import { counted, Icon, Row, Stack, Text } from '@/components/ui';
 import { residuePath } from '@/client/paths';
 import type { Design, Mutant } from '@/shared/contracts/plans';
-import { plateWords } from './change-plates';
 
 interface MutantHeadingProps {
   projectId: string;
@@ -43,7 +42,7 @@ export function MutantHeading({ projectId, mutant, design }: MutantHeadingProps)
           <span style={{ fontFamily: face.mono, fontWeight: 700 }}>{codon.codonTo}</span>
           <Text tone="soft">
             {[
-              `${codon.changedBases} ${codon.changedBases === 1 ? 'base' : 'bases'} changed`,
+              `${counted(codon.changedBases, 'base')} changed`,
               codon.hostShare === null ? 'no host share' : `host share ${codon.hostShare.toFixed(2)}`,
               chosenWords[codon.chosenBy],
             ].join(', ')}

@@ -8,6 +8,7 @@ import { useLayout } from '@/components/theme';
 import { Button, NothingHere, Row, Stack, Text } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { constructPath, planPath } from '@/client/paths';
+import { useFormDraft } from '@/client/use-form-draft';
 import { useRouteParams } from '@/client/use-route-params';
 import { useProtein } from '@/features/families';
 import { newConstructBody } from '@/shared/contracts/plans';
@@ -23,7 +24,6 @@ import { StartChoices } from '../components/start-choices';
 import { geneticCodeWords } from '../condition-words';
 import type { StartSuggestion } from '../start-suggestions';
 import { useForgetRefusal } from '../use-forget-refusal';
-import { useFormDraft } from '../use-form-draft';
 import { useMakeConstruct } from '../use-plans';
 
 const params = z.object({ projectId: z.uuid(), proteinId: z.uuid().optional() });

@@ -8,6 +8,7 @@ import { useLayout } from '@/components/theme';
 import { Banner, Button, NothingHere, Row, Stack } from '@/components/ui';
 import { showFieldErrors } from '@/client/field-errors';
 import { mutantPath, planPath } from '@/client/paths';
+import { useFormDraft } from '@/client/use-form-draft';
 import { useRouteParams } from '@/client/use-route-params';
 import { useProtein } from '@/features/families';
 import { newMutantBody, type Mutant } from '@/shared/contracts/plans';
@@ -18,7 +19,6 @@ import { PlannersOnly } from '../components/planners-only';
 import { MutantFields, type MutantValues } from '../components/mutant-fields';
 import { Refusal } from '../components/refusal';
 import { useForgetRefusal } from '../use-forget-refusal';
-import { useFormDraft } from '../use-form-draft';
 import { useConstructs, useDesign, useMakeMutant } from '../use-plans';
 
 const params = z.object({

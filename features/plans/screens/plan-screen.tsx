@@ -1,7 +1,7 @@
 import Plus from 'lucide-react-native/icons/plus';
 import { PageTitle, Panes, Screen } from '@/components/layout';
 import { useLayout } from '@/components/theme';
-import { Button, Caption, Empty, NothingHere, ReadView, Row, Stack, Text } from '@/components/ui';
+import { Button, Caption, counted, Empty, NothingHere, ReadView, Row, Stack, Text } from '@/components/ui';
 import { newConstructPath, newMutantPath } from '@/client/paths';
 import { useRouteParams } from '@/client/use-route-params';
 import { useFamilies } from '@/features/families';
@@ -116,9 +116,7 @@ function PrimerList({ projectId, mutants }: { projectId: string; mutants: readon
   const primers = listed.reduce((sum, design) => sum + design.primers.length, 0);
   return (
     <Stack gap={12}>
-      <Caption count={`${primers} primers of ${listed.length} ${listed.length === 1 ? 'mutant' : 'mutants'}`}>
-        Primer list
-      </Caption>
+      <Caption count={`${primers} primers of ${counted(listed.length, 'mutant')}`}>Primer list</Caption>
       <Text tone="soft">
         The chosen design of each mutant, or its best one where none is chosen; only designs whose product was
         read back.
