@@ -214,8 +214,3 @@ export const plans = {
 };
 
 export const planEvents = { 'construct.changed': construct, 'mutant.changed': mutant };
-
-export {
-  FIGURES_CAUTION as calculatedCaution,
-  PRIMER_CAUTION as primerCaution,
-} from '../sequence/primers/caution';

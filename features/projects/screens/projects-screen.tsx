@@ -1,22 +1,9 @@
 import Plus from 'lucide-react-native/icons/plus';
 import { EntryFrame } from '@/components/layout';
-import { useTheme } from '@/components/theme';
-import {
-  Banner,
-  Button,
-  Empty,
-  List,
-  ListRow,
-  Mark,
-  Person,
-  ReadView,
-  Row,
-  Stack,
-  Text,
-} from '@/components/ui';
+import { Button, Empty, List, ListRow, Mark, ReadView, Stack, Text } from '@/components/ui';
 import { findPath, newProjectPath } from '@/client/paths';
 import { usePerson } from '@/client/session';
-import { useSignOut } from '@/features/auth';
+import { OwnPerson } from '../components/own-person';
 import { motorWords } from '../motor-words.data';
 import { useProjects } from '../use-projects';
 
@@ -24,8 +11,6 @@ import { useProjects } from '../use-projects';
 export function ProjectsScreen() {
   const projects = useProjects();
   const person = usePerson();
-  const signOut = useSignOut();
-  const { theme, toggleTheme } = useTheme();
   return (
     <EntryFrame>
       <Stack gap={20}>
@@ -57,16 +42,7 @@ export function ProjectsScreen() {
         <Button kind="primary" icon={Plus} href={newProjectPath()} full>
           Make a project
         </Button>
-        {person ? (
-          <ListRow lead={<Person name={person.name} />} title={person.name} detail={person.email} />
-        ) : null}
-        {signOut.error ? <Banner kind="danger">{`Not signed out: ${signOut.error.message}`}</Banner> : null}
-        <Row wrap>
-          <Button onPress={toggleTheme}>{theme === 'dark' ? 'Light theme' : 'Dark theme'}</Button>
-          <Button onPress={() => signOut.mutate()} busyText={signOut.isPending ? 'Signing out' : undefined}>
-            Sign out
-          </Button>
-        </Row>
+        <OwnPerson />
       </Stack>
     </EntryFrame>
   );
