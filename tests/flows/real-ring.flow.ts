@@ -1,6 +1,5 @@
 // Steps 1 to 6 on real files: the c ring 4bem.pdb with the rows of c_small_mafft.afa.
-import type { Page } from 'playwright-core';
-import { carboxylateOf, proteinsOf } from './support/expected';
+import { carboxylateName, proteinsOf } from './support/expected';
 import { chainsShown, openChain, uploadStructure } from './support/chains';
 import { openFlowStage, type FlowStage } from './support/stage';
 import { phone, Visitor, wide } from './support/visitor';
@@ -8,7 +7,6 @@ import {
   asFile,
   button,
   choose,
-  chooseFile,
   facts,
   field,
   fixture,
@@ -17,7 +15,6 @@ import {
   locate,
   makeProject,
   openResidue,
-  projectAddress,
   see,
   signUp,
   tableRows,
@@ -37,13 +34,11 @@ afterAll(() => stage?.close());
 describe.each([phone, wide])('the c ring on a $name screen', (size) => {
   const isPhone = size.name === 'phone';
   let visitor: Visitor;
-  let project: string;
   beforeAll(async () => {
     visitor = await Visitor.at(stage.browser, stage.server.origin, size);
   });
   afterAll(() => visitor?.close());
   const walk = (act: Parameters<typeof withPage>[1]) => withPage(() => visitor, act);
-  const goHome = (page: Page) => visitor.go(project).then(() => see(page.getByRole('navigation')));
 
   // Source: families and parts of an F-type motor, handbook 1.
   test(
@@ -51,7 +46,6 @@ describe.each([phone, wide])('the c ring on a $name screen', (size) => {
     walk(async (page) => {
       await signUp(visitor, 'Ada Ring');
       await makeProject(page, `Ring on a ${size.name}`);
-      project = projectAddress(page);
       const main = page.getByRole('main');
       for (const [family, part] of [
         ['c', 'rotor'],
@@ -195,11 +189,11 @@ describe.each([phone, wide])('the c ring on a $name screen', (size) => {
       // Source: handbook 2.1 for E. coli, yeast and Acetobacterium woodii; the grade words are handbook 8.4.
       expect(column).toEqual([
         plateRow('c E62', 'ATPE2_ACEWO_4BEM', 'this residue'),
-        plateRow(`c ${carboxylateOf('E. coli')}`, 'ATPE_ECOLI', 'good similar letter'),
+        plateRow(`c ${carboxylateName('E. coli')}`, 'ATPE_ECOLI', 'good similar letter'),
         plateRow('c D60', 'ATPE_VIBCH', 'good similar letter'),
-        plateRow(`c ${carboxylateOf('S. cerevisiae')}`, 'ATP9_YEAST_3U32', 'strong same letter'),
+        plateRow(`c ${carboxylateName('S. cerevisiae')}`, 'ATP9_YEAST_3U32', 'strong same letter'),
         plateRow(
-          `c ${carboxylateOf('Acetobacterium woodii', 'c1')}`,
+          `c ${carboxylateName('Acetobacterium woodii', 'c1')}`,
           'ATPE1_ACEWO_4BEM',
           'strong same letter',
         ),

@@ -1,4 +1,5 @@
 // Reference answers, as rows of the screens would show them.
+import { carboxylateOf } from '@/tests/support/landmarks';
 import { readFixtureJson } from '@/tests/support/read-fixture';
 
 interface ExpectedAlignment {
@@ -12,22 +13,10 @@ export function proteinsOf(file: string): string[][] {
   return alignment.ids.map((id, place) => [id, String(alignment.ungapped_lengths[place])]);
 }
 
-interface Landmark {
-  site: string;
-  system: string;
-  family: string;
-  aminoAcid: string;
-  label: number;
-}
-
 /** `E59`: the residue that carries the ion in an organism. Source: handbook 2.1, as in landmarks.json (see its rows). */
-export function carboxylateOf(system: string, family = 'c'): string {
-  const { landmarks } = readFixtureJson<{ landmarks: Landmark[] }>('landmarks.json');
-  const found = landmarks.find(
-    (one) => one.site === 'membrane carboxylate' && one.system === system && one.family === family,
-  );
-  if (!found) throw new Error(`No landmark of ${system} ${family}.`);
-  return `${found.aminoAcid}${found.label}`;
+export function carboxylateName(system: string, family?: string): string {
+  const { aminoAcid, label } = carboxylateOf(system, family);
+  return `${aminoAcid}${label}`;
 }
 
 type Place = [number: string, letter: string, column: number, rowLetter: string];

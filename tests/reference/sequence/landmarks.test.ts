@@ -1,25 +1,12 @@
-import { readFileSync } from 'node:fs';
-import { join } from 'node:path';
 import { columnOfResidue, residueAtColumn } from '@/shared/sequence/alignment/columns';
 import { readAlignedFasta } from '@/shared/sequence/alignment/read-fasta';
 import { labelOfResidue, offsetNumbering, residueOfLabel } from '@/shared/sequence/numbering/numbering';
 import { residueIndex } from '@/shared/sequence/positions';
 import { readPdb } from '@/shared/structure/pdb/read-pdb';
+import { landmarks, sequences } from '@/tests/support/landmarks';
+import { readFixtureJson } from '@/tests/support/read-fixture';
+import { structureBytes } from '@/tests/support/structure-fixtures';
 
-const fixtures = join(__dirname, '../../fixtures');
-const json = (file: string) => JSON.parse(readFileSync(join(fixtures, file), 'utf8'));
-
-interface Landmark {
-  site: string;
-  system: string;
-  family: string;
-  aminoAcid: string;
-  label: number;
-  sequence: string | null;
-  sequenceIndex1: number | null;
-}
-const { landmarks, sequences }: { landmarks: Landmark[]; sequences: Record<string, string> } =
-  json('landmarks.json');
 const FILE_NAMES: Record<string, string> = {
   bov_a: 'bovine_alpha_1BMF',
   bov_b: 'bovine_beta_1BMF_truncated',
@@ -45,7 +32,9 @@ test('the list of held landmarks is not empty', () => {
 });
 
 test('through the family alignment E. coli c Asp61 is each organism’s own carboxylate', () => {
-  const rows: Record<string, string> = json('alignment-checks.json').anchoredFamily.rows;
+  const { rows } = readFixtureJson<{ anchoredFamily: { rows: Record<string, string> } }>(
+    'alignment-checks.json',
+  ).anchoredFamily;
   const text = Object.entries(rows).map(([name, aligned]) => `>${name}\n${aligned}\n`);
   const family = readAlignedFasta(text.join('')).value?.rows ?? [];
   const ecoli = family.find((row) => row.name === 'c_ecoli');
@@ -63,7 +52,7 @@ test('through the family alignment E. coli c Asp61 is each organism’s own carb
 
 // Handbook, rows 8 and 9 of its acceptance checks; the offsets are read in the DBREF records of the file.
 test('1COW: author numbers to precursor numbers by the file’s own references', () => {
-  const { value } = readPdb(readFileSync(join(fixtures, 'structures/1cow.pdb')));
+  const { value } = readPdb(structureBytes('1cow.pdb'));
   const precursorOf = (chainId: string, label: string) => {
     const chain = value?.chains.find((candidate) => candidate.id === chainId);
     const reference = chain?.references[0];

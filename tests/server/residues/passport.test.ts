@@ -1,5 +1,6 @@
 // The passport of residues of real files: 4bem.pdb on the rows of c_small_mafft.afa.
 import { families, residues, type Passport } from '@/shared/contracts';
+import { carboxylateOf } from '@/tests/support/landmarks';
 import { readFixtureJson } from '@/tests/support/read-fixture';
 import { startTestServer, type TestServer } from '@/tests/support/server';
 import { stageAlignment, stageStructure, type RowName, type Stage } from '@/tests/support/stage';
@@ -13,14 +14,6 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-interface Landmark {
-  site: string;
-  system: string;
-  family: string;
-  aminoAcid: string;
-  label: number;
-}
-const { landmarks } = readFixtureJson<{ landmarks: Landmark[] }>('landmarks.json');
 const rowOf: [RowName, string, string][] = [
   ['ATPE_ECOLI', 'E. coli', 'c'],
   ['ATP9_YEAST_3U32', 'S. cerevisiae', 'c'],
@@ -29,13 +22,7 @@ const rowOf: [RowName, string, string][] = [
 ];
 /** Source: landmarks.json, membrane carboxylate of each organism. */
 const carboxylate = new Map(
-  rowOf.map(([row, system, family]) => {
-    const found = landmarks.find(
-      (one) => one.site === 'membrane carboxylate' && one.system === system && one.family === family,
-    );
-    if (!found) throw new Error(`no landmark of ${system} ${family}`);
-    return [row, found] as const;
-  }),
+  rowOf.map(([row, system, family]) => [row, carboxylateOf(system, family)] as const),
 );
 const landmark = (row: RowName) => {
   const found = carboxylate.get(row);
