@@ -64,6 +64,12 @@ module.exports = {
       displayName: 'faults',
       testMatch: ['<rootDir>/tests/faults/**/*.test.ts'],
     },
-    { ...shared, ...slow, displayName: 'fuzz', testMatch: ['<rootDir>/tests/fuzz/**/*.test.ts'] },
+    {
+      ...shared,
+      ...onDatabase,
+      ...slow,
+      displayName: 'fuzz',
+      testMatch: ['<rootDir>/tests/fuzz/**/*.test.ts'],
+    },
   ],
 };

@@ -22,7 +22,7 @@ export const steps = [
   { name: 'build', run: build },
   { name: 'flows', run: jest('flows', '--runInBand'), needs: ['database', 'chromium', 'client'] },
   { name: 'faults', run: jest('faults', '--runInBand'), needs: ['database', 'client'], durable: true },
-  { name: 'fuzz', run: jest('fuzz', '--runInBand') },
+  { name: 'fuzz', run: jest('fuzz', '--runInBand'), needs: ['database'] },
 ];
 
 function tool(program, ...args) {

@@ -14,6 +14,13 @@ export const auditEntry = z.object({
 });
 export type AuditEntry = z.infer<typeof auditEntry>;
 
+/** Kinds and ids are plain letters: the database cannot compare others with them. */
+const word = (longest: number) =>
+  z
+    .string()
+    .max(longest)
+    .regex(/^[\x20-\x7e]*$/, 'Plain letters, digits and signs.');
+
 export const audit = {
   list: endpoint({
     name: 'audit.list',
@@ -21,8 +28,8 @@ export const audit = {
     path: '/projects/:projectId/audit',
     params: projectParams,
     query: z.strictObject({
-      subjectKind: z.string().max(40).optional(),
-      subjectId: z.string().max(120).optional(),
+      subjectKind: word(40).optional(),
+      subjectId: word(120).optional(),
       before: z.coerce.number().int().min(1).optional(),
       limit: z.coerce.number().int().min(1).max(100).default(50),
     }),
