@@ -143,38 +143,42 @@ async function judge(name: string, sent: string, ask: () => Promise<Response>): 
   return response.status;
 }
 
-test('every endpoint, with bodies, queries, ids and headers of every kind', async () => {
-  const statuses = new Map<number, number>();
-  let asked = 0;
-  const began = Date.now();
-  const faults: string[] = [];
-  for (const { endpoint } of server.container.routes.registered) {
-    if (endpoint.name === uploads.make.name) continue; // a form: below
-    const count = slowOnPurpose.has(endpoint.name) ? Math.ceil(each / 5) : each;
-    const requests = Array.from({ length: count }, () => requestTo(endpoint));
-    let done = 0;
-    const send = async ({ address, init, sent }: (typeof requests)[number]) => {
-      try {
-        const status = await judge(endpoint.name, sent, () => fetch(address, init));
-        statuses.set(status, (statuses.get(status) ?? 0) + 1);
-        if (status < 300) done += 1;
-      } catch (error) {
-        faults.push(error instanceof Error ? error.message : String(error));
-      }
-    };
-    for (let at = 0; at < count; at += atOnce) await Promise.all(requests.slice(at, at + atOnce).map(send));
-    asked += count;
-    if (process.env.FUZZ_VERBOSE) report(`${endpoint.name}: ${done} of ${count} done`);
-  }
-  const list = [...statuses]
-    .sort(([one], [other]) => one - other)
-    .map(([status, many]) => `${status}: ${many}`);
-  report(`${asked} requests in ${Date.now() - began} ms, seed ${seed}; ${list.join(', ')}`);
-  expect(faults).toEqual([]);
-  // Not only the door was knocked at.
-  expect(statuses.get(200) ?? 0).toBeGreaterThan(asked / 10);
-  expect(statuses.get(201) ?? 0).toBeGreaterThan(0);
-}, patienceMilliseconds);
+test(
+  'every endpoint, with bodies, queries, ids and headers of every kind',
+  async () => {
+    const statuses = new Map<number, number>();
+    let asked = 0;
+    const began = Date.now();
+    const faults: string[] = [];
+    for (const { endpoint } of server.container.routes.registered) {
+      if (endpoint.name === uploads.make.name) continue; // a form: below
+      const count = slowOnPurpose.has(endpoint.name) ? Math.ceil(each / 5) : each;
+      const requests = Array.from({ length: count }, () => requestTo(endpoint));
+      let done = 0;
+      const send = async ({ address, init, sent }: (typeof requests)[number]) => {
+        try {
+          const status = await judge(endpoint.name, sent, () => fetch(address, init));
+          statuses.set(status, (statuses.get(status) ?? 0) + 1);
+          if (status < 300) done += 1;
+        } catch (error) {
+          faults.push(error instanceof Error ? error.message : String(error));
+        }
+      };
+      for (let at = 0; at < count; at += atOnce) await Promise.all(requests.slice(at, at + atOnce).map(send));
+      asked += count;
+      if (process.env.FUZZ_VERBOSE) report(`${endpoint.name}: ${done} of ${count} done`);
+    }
+    const list = [...statuses]
+      .sort(([one], [other]) => one - other)
+      .map(([status, many]) => `${status}: ${many}`);
+    report(`${asked} requests in ${Date.now() - began} ms, seed ${seed}; ${list.join(', ')}`);
+    expect(faults).toEqual([]);
+    // Not only the door was knocked at.
+    expect(statuses.get(200) ?? 0).toBeGreaterThan(asked / 10);
+    expect(statuses.get(201) ?? 0).toBeGreaterThan(0);
+  },
+  patienceMilliseconds,
+);
 
 test('forms with bytes changed', async () => {
   const file = readFileSync(path.join(__dirname, '../fixtures/alignments/c_small_mafft.afa'));
