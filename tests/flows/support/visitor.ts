@@ -1,5 +1,6 @@
 // Somebody at a screen of a certain size and theme, and what every page must keep while they use it.
 import { readFileSync } from 'node:fs';
+import type axe from 'axe-core';
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 
 export const phone = { name: 'phone', width: 390, height: 844 } as const;
@@ -59,7 +60,7 @@ export class Visitor {
     // Not as a script of the page: its content security policy would refuse that, as it should.
     await this.page.evaluate(axeSource);
     return this.page.evaluate(async () => {
-      const page = (window as unknown as { axe: typeof import('axe-core') }).axe;
+      const page = (window as unknown as { axe: typeof axe }).axe;
       const { violations } = await page.run(document, { resultTypes: ['violations'] });
       return violations.map(
         (one) =>
