@@ -17,13 +17,16 @@ export interface ThreadLogProps {
   acts: LineActs;
   /** Scrolls by itself within its place; else it stands at its full height on the page. */
   scrolls: boolean;
+  /** Level of the days' headings: one below the heading above. */
+  dayLevel: 2 | 3;
   earlier?: { load: () => void; isLoading: boolean; error: string | null };
 }
 
 const dayStyle = { padding: '10px 0 2px 52px', font: `400 12px/16px ${face.text}`, color: color.inkSoft };
 
 /** The minutes of a thread, day by day. What arrives never moves what is being read. */
-export function ThreadLog({ projectId, lines, acts, scrolls, earlier }: ThreadLogProps) {
+export function ThreadLog({ projectId, lines, acts, scrolls, dayLevel, earlier }: ThreadLogProps) {
+  const Day = dayLevel === 2 ? 'h2' : 'h3';
   const ownId = usePerson()?.id;
   const names = useResidueNames(projectId);
   const online = useOnline();
@@ -62,7 +65,7 @@ export function ThreadLog({ projectId, lines, acts, scrolls, earlier }: ThreadLo
           ) : null}
           {days.map((day) => (
             <section key={day.key} aria-label={dayWords(day.iso)}>
-              <h3 style={dayStyle}>{dayWords(day.iso)}</h3>
+              <Day style={dayStyle}>{dayWords(day.iso)}</Day>
               {day.lines.map((line) => {
                 const writer = line.state === 'stored' ? line.message.by.id : ownId;
                 return (

@@ -90,6 +90,7 @@ export function ThreadPanel({
           lines={lines}
           acts={acts}
           scrolls={kind === 'pane'}
+          dayLevel={title === false ? 2 : 3}
           earlier={earlier}
         />
       ) : null}
