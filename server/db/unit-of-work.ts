@@ -46,6 +46,8 @@ export class UnitOfWork {
 
   /** `work` returns what is answered; asked again under the same client key, the same is answered without working. */
   async write<T>(scope: WriteScope, work: (unit: Unit) => Promise<T>): Promise<T> {
+    // It would wait for its own project's turn, for ever.
+    if (this.inside.getStore()) throw new Error('A unit of work cannot begin inside another.');
     for (let attempt = 0; ; attempt += 1) {
       let isCommitting = false;
       const once = () =>

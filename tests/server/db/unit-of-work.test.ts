@@ -72,6 +72,32 @@ const count = async (table: string): Promise<number> => {
   return Number((row as { rows_there: string }).rows_there);
 };
 
+test('a unit inside a unit is refused at once, where it would wait for itself', async () => {
+  const { unitOfWork } = server.container;
+  const scope = { projectId: stage.projectId, actorId: stage.lead.id };
+  const nested = unitOfWork.write(scope, () => unitOfWork.write(scope, async () => 'never'));
+  await expect(nested).rejects.toThrow('A unit of work cannot begin inside another.');
+  // The project goes on.
+  expect(await unitOfWork.write(scope, async () => 'done')).toBe('done');
+});
+
+test('what is read inside a unit is read on its own connection, with what it wrote', async () => {
+  const { unitOfWork } = server.container;
+  const scope = { projectId: stage.projectId, actorId: stage.lead.id };
+  const name = `Motor ${randomUUID()}`;
+  const nameNow = async () => {
+    const [row] = await unitOfWork.reader.query('SELECT name FROM project WHERE id = ?', [stage.projectId]);
+    return (row as { name: string }).name;
+  };
+  const undone = unitOfWork.write(scope, async ({ manager }) => {
+    await manager.query('UPDATE project SET name = ? WHERE id = ?', [name, stage.projectId]);
+    expect(await nameNow()).toBe(name);
+    throw new Error('undone');
+  });
+  await expect(undone).rejects.toThrow('undone');
+  expect(await nameNow()).not.toBe(name);
+});
+
 describe('a request that carries its own key', () => {
   test('asked again, is answered the same and done once', async () => {
     const key = randomUUID();
