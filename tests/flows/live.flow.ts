@@ -38,7 +38,8 @@ async function minutes(visitor: Visitor, own: string): Promise<string[]> {
 
 /** Both show the same list; gives it. */
 async function sameMinutes(): Promise<string[]> {
-  let [one, other]: string[][] = [[], []];
+  let one: string[] = [];
+  let other: string[] = [];
   await eventually(async () => {
     one = await minutes(teo, 'Teo Marrick');
     other = await minutes(ysolde, 'Ysolde Brant');

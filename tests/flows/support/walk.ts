@@ -50,13 +50,6 @@ export async function makeProject(page: Page, name: string): Promise<void> {
   await see(page.getByRole('heading', { name: 'Start' }));
 }
 
-/** Address of the open project: everything of it is below. */
-export function projectAddress(page: Page): string {
-  const [address] = /\/projects\/[^/?]+/.exec(new URL(page.url()).pathname) ?? [];
-  if (!address) throw new Error(`No project is open at ${page.url()}.`);
-  return address;
-}
-
 export const field = (page: Page | Locator, name: string): Locator => page.getByLabel(name, { exact: true });
 
 /** Chooses by what an option says. */
