@@ -4,6 +4,7 @@ import type { Page } from 'playwright-core';
 import { FIGURES_CAUTION, PRIMER_CAUTION } from '@/shared/sequence/primers/caution';
 import { codingBases, codingRecord } from '@/tests/support/stage';
 import { aminoAcidsOf, productOfPair, rowOfFile } from './support/coding';
+import { figuresCaution, primerCaution } from './support/expected';
 import { openFlowStage, type FlowStage } from './support/stage';
 import { phone, Visitor, wide } from './support/visitor';
 import {

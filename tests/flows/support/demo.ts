@@ -14,6 +14,17 @@ export function addressOf(family: 'c' | 'a', site: string): string {
   return writeResidue(alignments, residue);
 }
 
+/** What each organism carries at a named site: `c E64`, organism. */
+export function equivalentsOf(family: 'c' | 'a', site: string): [plate: string, organism: string][] {
+  const { alignments } = makeScenario();
+  const rows = alignments.find((one) => one.family === family)?.rows ?? [];
+  return rows.flatMap(({ organism }) => {
+    const residue = residueAtSite(alignments, family, site, organism);
+    if (!residue) return [];
+    return [[writeResidue(alignments, residue).replace(family, `${family} `), organism] as [string, string]];
+  });
+}
+
 /** Signs in as one of them and opens the demo. */
 export async function enterDemo(visitor: Visitor, name: string): Promise<void> {
   const email = people.find((person) => person.name === name)?.email;

@@ -37,3 +37,8 @@ export function placesAtBreaks(structure: string, chain: string): Place[] {
     return !isNext(one, mapping[at + 1]) || (before !== undefined && !isNext(before, one));
   });
 }
+
+/** What stands on every primer list and export. Source: handbook 13. */
+export const primerCaution =
+  "Check the design before you order. Follow your institution's rules on biosafety and recombinant DNA; this tool does not replace review by a qualified person.";
+export const figuresCaution = 'Calculated for the stated concentrations; real reactions differ.';
