@@ -58,7 +58,8 @@ export class LocateQueries {
   private async residuesOf(projectId: string, reading: AddressReading) {
     if (reading.kind === 'chain') {
       const { found, unmapped } = await this.lookup.byChain(projectId, reading);
-      return { found, notes: unmapped };
+      const nowhere = `Chain ${reading.chainId ?? ''}: no current structure has a residue ${reading.label} there.`;
+      return { found, notes: found.length + unmapped.length > 0 ? unmapped : [nowhere] };
     }
     // Several numberings may lead to one residue, so more rows are read than are shown.
     const found = await this.lookup.byNumber(projectId, reading, readingsInGroup * 40);

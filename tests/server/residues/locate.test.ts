@@ -123,6 +123,11 @@ test.each([
   expect(readings).toEqual([]);
 });
 
+test('a chain that has no such residue is named, so that nobody waits for more', async () => {
+  const { notReadAs } = await locate('A:9999');
+  expect(notReadAs).toContain('Chain A: no current structure has a residue 9999 there.');
+});
+
 test('10,000 characters are refused, with how many may be sent', async () => {
   const answer = await ask('c'.repeat(10_000));
   expect(answer.status).toBe(400);
