@@ -108,7 +108,7 @@ test(`${size.messages} messages, ${size.kills} server kills: one list on both cl
   };
   const kill = async () => {
     for (let kills = 0; kills < size.kills; kills += 1) {
-      await pause(between(random, 800, 3500));
+      await pause(between(random, isFull ? 800 : 500, isFull ? 3500 : 1800));
       await bench.server.kill();
       await pause(between(random, 0, 600));
       await bench.server.restart();

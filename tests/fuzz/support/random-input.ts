@@ -1,5 +1,6 @@
 // Input of a shape that is nearly right: by the schema's own description, with anything in the wrong place now and then.
 import { between, pick } from '@/tests/support/random';
+import { codingRecord } from '@/tests/support/stage';
 
 type Random = () => number;
 
@@ -85,34 +86,40 @@ export function anything(random: Random, depth = 0): unknown {
   );
 }
 
-/** Mostly what the shape asks for; `idFor` gives real ids, so that what comes behind the first check is reached too. */
-export function nearly(random: Random, shape: Shape, idFor: (name: string) => string, name = ''): unknown {
-  if (random() < 0.02) return anything(random);
+export interface Nearly {
+  /** Gives real ids, so that what comes behind the first check is reached too. */
+  idFor: (name: string) => string;
+  /** Chance that anything stands where something of the shape should. */
+  wild: number;
+}
+
+/** Mostly what the shape asks for. */
+export function nearly(random: Random, shape: Shape, how: Nearly, name = ''): unknown {
+  if (random() < how.wild) return anything(random);
   if (shape.const !== undefined) return shape.const;
   if (shape.enum) return pick(random, shape.enum);
   const choices = shape.anyOf ?? shape.oneOf;
-  if (choices) return nearly(random, pick(random, choices), idFor, name);
+  if (choices) return nearly(random, pick(random, choices), how, name);
   if (shape.properties) {
     const entries = Object.entries(shape.properties)
       .filter(([key]) => ((shape.required?.includes(key) ?? false) ? random() < 0.97 : random() < 0.6))
-      .map(([key, inner]) => [key, nearly(random, inner, idFor, key)]);
+      .map(([key, inner]) => [key, nearly(random, inner, how, key)]);
     return Object.fromEntries(entries);
   }
   if (shape.type === 'array') {
     const length = random() < 0.9 ? between(random, 0, 3) : between(random, 0, 60);
-    return Array.from({ length }, () => nearly(random, shape.items ?? {}, idFor));
+    return Array.from({ length }, () => nearly(random, shape.items ?? {}, how));
   }
+  if (name === 'codingStart' && random() < 0.7) return 1;
+  if (name === 'geneticCode' && random() < 0.7) return 11;
   if (shape.type === 'integer' || shape.type === 'number')
-    return random() < 0.85 ? between(random, 0, 70) : pick(random, numbers);
+    return random() > how.wild * 5 ? between(random, 0, 70) : pick(random, numbers);
   if (shape.type === 'boolean') return random() < 0.5;
   if (shape.type === 'string') {
-    if (shape.format === 'uuid') return idFor(name);
+    if (shape.format === 'uuid') return how.idFor(name);
     if (shape.format === 'email') return `${pick(random, ['a', 'ä', 'x'.repeat(300)])}@lab.example`;
-    if (name === 'dna')
-      return 'ATGGAAAACCTGAATATGGATCTGCTGTACATGGCTGCCGCTGTGATGATGGGTCTGGCGGCAATC'.slice(
-        between(random, 0, 9),
-      );
-    return random() < 0.8
+    if (name === 'dna') return codingRecord('VIBCH_atpE').slice(0, random() < 0.7 ? undefined : 200);
+    return random() > how.wild * 5
       ? pick(random, ['E62Q', 'D60Q', 'a name', 'Looks right.', '1'])
       : pick(random, texts);
   }
