@@ -91,7 +91,7 @@ export function Button(props: ButtonProps) {
   );
   if (href && !isOff) {
     return (
-      <Link href={href} className={look.press} style={style} label={label}>
+      <Link href={href} className={`${look.press} no-print`} style={style} label={label}>
         {content}
       </Link>
     );

@@ -6,10 +6,11 @@ import Search from 'lucide-react-native/icons/search';
 import { projectParams } from '@/shared/contracts/common';
 import type { OwnProject } from '@/shared/contracts/projects';
 import { AppShell, EntryFrame, type Place } from '@/components/layout';
-import { useLayout } from '@/components/theme';
+import { useLayout, usePrinting } from '@/components/theme';
 import { Banner, IconButton, Link, NothingHere, ReadView, Stack } from '@/components/ui';
 import {
   findPath,
+  historyPath,
   locatePath,
   peoplePath,
   planPath,
@@ -25,6 +26,7 @@ import { useLiveProject } from '@/features/projects';
 import { LocatorBox } from '@/features/residues';
 import { KeysDialog } from './components/keys-dialog';
 import { LineNotice } from './components/line-notice';
+import { PrintedWords } from './components/printed-words';
 import { RailFoot } from './components/rail-foot';
 import { standingWords } from './components/standing-words';
 import { WhoIsHere } from './components/who-is-here';
@@ -65,12 +67,12 @@ function placesOf(projectId: string): Place[] {
   ];
 }
 
-/** The place an address belongs to; people and settings belong to none. */
+/** The place an address belongs to; people, settings and history belong to none. */
 function placeOf(path: string, projectId: string): string | undefined {
   const isUnder = (start: string) => path === start || path.startsWith(`${start}/`);
   if (isUnder(threadsPath(projectId))) return 'threads';
   if (isUnder(planPath(projectId))) return 'plan';
-  return [peoplePath(projectId), settingsPath(projectId)].some(isUnder) ? undefined : 'find';
+  return [peoplePath, settingsPath, historyPath].some((of) => isUnder(of(projectId))) ? undefined : 'find';
 }
 
 /** The locator's box where one is on the page, else its own page. */
@@ -90,6 +92,7 @@ function Shell({ project }: { project: OwnProject }) {
   const news = useLineNews();
   const connection = useConnection();
   const { hasRail } = useLayout();
+  const isPrinting = usePrinting();
   const [showsKeys, setShowsKeys] = useState(false);
   useKeys({
     '/': () => openLocator(() => router.push(locatePath(projectId) as never)),
@@ -119,7 +122,13 @@ function Shell({ project }: { project: OwnProject }) {
       }
       phoneEnd={<IconButton icon={Search} label="Find a residue" href={locatePath(projectId)} />}
       notice={hasNotice ? notice : undefined}
-      standing={standingWords(project.invented, connection, !hasRail)}
+      standing={
+        isPrinting ? (
+          <PrintedWords project={project} by={person?.name ?? ''} />
+        ) : (
+          standingWords(project.invented, connection, !hasRail)
+        )
+      }
     >
       <Slot />
       <KeysDialog open={showsKeys} onClose={() => setShowsKeys(false)} />

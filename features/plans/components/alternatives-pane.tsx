@@ -32,7 +32,11 @@ export function AlternativesPane(props: AlternativesPaneProps) {
   const isStale = acts.problem?.status === 412;
   return (
     <Stack gap={16}>
-      {hasDesigns ? <Alternatives designs={mutant.designs} shownId={design?.id} onShow={onShow} /> : null}
+      {hasDesigns ? (
+        <div className="no-print">
+          <Alternatives designs={mutant.designs} shownId={design?.id} onShow={onShow} />
+        </div>
+      ) : null}
       <Purpose projectId={projectId} mutant={mutant} />
       {may('plan') && hasDesigns && !asked ? (
         <Button onPress={() => setAsked(true)}>Design for another construct or host</Button>

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { face } from '@/components/theme';
+import { face, usePrinting } from '@/components/theme';
 import { Caption, CopyButton, Stack, Table, Text } from '@/components/ui';
 import type { Design, Primer } from '@/shared/contracts/plans';
 import { figure } from '../check-words';
@@ -12,7 +12,7 @@ interface FigureRow {
   of: (primer: Primer) => ReactNode;
 }
 
-const rows: readonly FigureRow[] = [
+const figureRows: readonly FigureRow[] = [
   {
     key: 'bases',
     name: 'bases, 5′ to 3′',
@@ -42,6 +42,8 @@ const rows: readonly FigureRow[] = [
 
 /** The primers with everything that was calculated of them. */
 export function PrimerTable({ design }: { design: Design }) {
+  const isPrinting = usePrinting();
+  const rows = isPrinting ? figureRows.filter(({ key }) => key !== 'copy') : figureRows;
   return (
     <Stack gap={8}>
       <Caption count="complementary pair">Primers</Caption>

@@ -70,7 +70,11 @@ function OpenMutant({ projectId, mutantId, mutant, design: rank }: Given & { mut
             label: 'Mutations',
             widthPixels: 320,
             hideWhenStacked: true,
-            content: <MutantPane projectId={projectId} mutants={mutants ?? [mutant]} currentId={mutantId} />,
+            content: (
+              <div className="no-print">
+                <MutantPane projectId={projectId} mutants={mutants ?? [mutant]} currentId={mutantId} />
+              </div>
+            ),
           },
           {
             key: 'design',
@@ -108,12 +112,13 @@ function titleItems(
   const numbering = mutant.mutations[0]?.residue.numbering ?? '';
   if (!construct) {
     return [
-      { key: 'construct', label: 'Construct', value: mutant.constructName ?? 'none yet' },
       { key: 'numbering', label: 'Numbering', value: numbering },
+      { key: 'construct', label: 'Construct', value: mutant.constructName ?? 'none yet' },
     ];
   }
   const size = construct.bases.length;
   return [
+    { key: 'numbering', label: 'Numbering', value: numbering },
     { key: 'construct', label: 'Construct', value: `${construct.name}, ${size} bp` },
     { key: 'code', label: 'Code', value: geneticCodeWords(construct.geneticCode) },
     ...codons.map(({ residue, codonStart }) => ({
@@ -121,7 +126,6 @@ function titleItems(
       label: `Codon ${residue.label}`,
       value: `bases ${baseRange(codonStart, 3, size)}`,
     })),
-    { key: 'numbering', label: 'Numbering', value: numbering },
     { key: 'conditions', label: 'Conditions', value: concentrationWords() },
   ];
 }

@@ -2,7 +2,7 @@ import { useState } from 'react';
 import ArrowRight from 'lucide-react-native/icons/arrow-right';
 import type { Passport } from '@/shared/contracts/residues';
 import { Grade, Plate, plateWords } from '@/components/residue';
-import { face } from '@/components/theme';
+import { face, usePrinting } from '@/components/theme';
 import { Button, Caption, Empty, Stack, Table, Text, type TableColumn } from '@/components/ui';
 import { alignmentPath } from '@/client/paths';
 import { columnRows, type ColumnRow } from '../column-rows';
@@ -62,7 +62,8 @@ export function ColumnTable({ projectId, passport, all }: ColumnTableProps) {
   const { column, residue, equivalents } = passport;
   const rows = columnRows(passport);
   const [count, setCount] = useState(atFirst + 1);
-  const shown = all ? rows : rows.slice(0, count);
+  const isPrinting = usePrinting();
+  const shown = all || isPrinting ? rows : rows.slice(0, count);
   const title = column ? `Column ${column.column + 1} of ${column.alignmentName}` : 'Equivalents';
   return (
     <section aria-label={title}>

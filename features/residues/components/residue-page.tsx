@@ -1,4 +1,5 @@
 import type { Passport } from '@/shared/contracts/residues';
+import { usePrinting } from '@/components/theme';
 import { Stack } from '@/components/ui';
 import { PinsSection } from '@/features/annotations';
 import { CarriedSection } from './carried-section';
@@ -21,6 +22,8 @@ interface ResiduePageProps {
 /** One residue: what it is, what it is called, what is known of it and planned with it. */
 export function ResiduePage({ projectId, passport, becomes, onPin, hasSource }: ResiduePageProps) {
   const { residue } = passport;
+  const isPrinting = usePrinting();
+  const isWhole = isPrinting || !hasSource;
   return (
     <Stack gap={24}>
       <ResidueHead projectId={projectId} passport={passport} />
@@ -29,8 +32,8 @@ export function ResiduePage({ projectId, passport, becomes, onPin, hasSource }: 
       <CarriedSection passport={passport} />
       <PinsSection projectId={projectId} residue={residue} onPin={onPin} />
       <MutantsSection projectId={projectId} residue={residue} />
-      {hasSource ? null : <CopiesSection projectId={projectId} passport={passport} />}
-      {hasSource ? null : <ColumnTable projectId={projectId} passport={passport} />}
+      {isWhole ? <CopiesSection projectId={projectId} passport={passport} /> : null}
+      {isWhole ? <ColumnTable projectId={projectId} passport={passport} /> : null}
     </Stack>
   );
 }

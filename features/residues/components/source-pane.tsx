@@ -13,15 +13,18 @@ export function SourcePane({ projectId, passport }: { projectId: string; passpor
     { key: 'copies', label: 'Copies', count: passport.copies.length },
   ];
   return (
-    <Stack gap={16}>
-      <Tabs items={items} current={tab} onChange={setTab} label="Source" panelId={panelId} />
-      <div id={panelId} role="tabpanel">
-        {tab === 'column' ? (
-          <ColumnTable projectId={projectId} passport={passport} all />
-        ) : (
-          <CopiesSection projectId={projectId} passport={passport} />
-        )}
-      </div>
-    </Stack>
+    // On paper the page itself holds the column and the copies.
+    <div className="no-print">
+      <Stack gap={16}>
+        <Tabs items={items} current={tab} onChange={setTab} label="Source" panelId={panelId} />
+        <div id={panelId} role="tabpanel">
+          {tab === 'column' ? (
+            <ColumnTable projectId={projectId} passport={passport} all />
+          ) : (
+            <CopiesSection projectId={projectId} passport={passport} />
+          )}
+        </div>
+      </Stack>
+    </div>
   );
 }
