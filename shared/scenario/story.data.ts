@@ -207,13 +207,13 @@ export const mutantTexts: MutantText[] = [
     author: 'hadwin',
     changes: [{ site: carboxylate, to: 'Q' }],
     reason:
-      'Takes the charge away and keeps the shape; *Nerivola profunda* carries a Q there: {c.carboxylate @ Nerivola profunda}.',
+      'Takes the charge away and keeps the shape; Nerivola profunda carries a Q there: {c.carboxylate @ Nerivola profunda}.',
   },
   {
     author: 'marrick',
     changes: [{ site: carboxylate, to: 'D' }],
     reason:
-      'Keeps the charge, one carbon shorter, as {c.carboxylate @ Cryorota nivalis} of *Cryorota nivalis*.',
+      'Keeps the charge, one carbon shorter, as {c.carboxylate @ Cryorota nivalis} of Cryorota nivalis.',
   },
   {
     author: 'hadwin',
@@ -224,6 +224,6 @@ export const mutantTexts: MutantText[] = [
     author: 'brant',
     changes: [{ site: { family: 'c', site: 'loop polar' }, to: 'Q' }],
     reason:
-      'Control away from the membrane; {c.loop polar @ Salivena maris} of *Salivena maris* shows that the loop bears it.',
+      'Control away from the membrane; {c.loop polar @ Salivena maris} of Salivena maris shows that the loop bears it.',
   },
 ];

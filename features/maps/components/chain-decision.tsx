@@ -41,8 +41,8 @@ export function ChainDecision({ projectId, group, families, deciding, isPrimary 
     });
   options.push({
     value: 'correct',
-    title: 'Another protein',
-    consequence: 'Choose one of the project; the chain is laid on it anew.',
+    title: standing === 'choose' ? 'A protein of the project' : 'Another protein',
+    consequence: 'Choose it; the chain is then aligned with it.',
   });
   if ((first.candidates[0]?.identity ?? 0) < certainIdentity)
     options.push({

@@ -31,7 +31,7 @@ export function MutantPane({ projectId, mutants, currentId }: MutantPaneProps) {
       ) : (
         <Empty title="No mutation planned yet">
           {may('plan')
-            ? 'Plan one here, or from the page of the residue it changes. A wish may come before its DNA.'
+            ? 'Plan one here, or from the page of the residue it changes. It can be planned before its DNA is here.'
             : 'Contributors, curators and leads plan mutations; you read here.'}
         </Empty>
       )}

@@ -39,9 +39,19 @@ function groupsOfEqualSequence(chains: readonly Chain[]): MappableChain[][] {
   return [...groups.values()];
 }
 
+/** The nearest proteins; the rival that the words name comes right behind the best, so that lists name the same one. */
+function nearestOf(
+  { maps }: ChainMatch,
+  rival: ChainMatch['maps'][number] | null,
+): ChainMatch['maps'][number][] {
+  const [best, ...others] = maps.filter((map) => map !== rival);
+  if (!rival || !best) return maps.slice(0, candidatesKept);
+  return [best, rival, ...others].slice(0, candidatesKept);
+}
+
 function proposal(match: ChainMatch, candidates: readonly CandidateProtein[]): NewMap {
-  const { outcome, words, family, best, equallyGood } = proposeProtein(match, candidates);
-  const nearest = match.maps.slice(0, candidatesKept).map(({ proteinId, identity, coverage }) => ({
+  const { outcome, words, family, best, equallyGood, rival } = proposeProtein(match, candidates);
+  const nearest = nearestOf(match, rival).map(({ proteinId, identity, coverage }) => ({
     proteinId,
     identity,
     coverage,
