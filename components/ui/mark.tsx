@@ -26,7 +26,8 @@ export function Mark({ children, tone = 'soft', icon = usual[tone] }: MarkProps)
       }}
     >
       {icon ? <Icon of={icon} tone={tone} sizePixels={16} /> : null}
-      <span>{children}</span>
+      {/* Its baseline is the mark's, so that it stands level within a sentence. */}
+      <span style={{ alignSelf: 'baseline' }}>{children}</span>
     </span>
   );
 }

@@ -2,6 +2,7 @@ import { useFieldArray, type Control } from 'react-hook-form';
 import Plus from 'lucide-react-native/icons/plus';
 import X from 'lucide-react-native/icons/x';
 import { evidenceKinds } from '@/shared/contracts/annotations';
+import { color } from '@/components/theme';
 import { BoundSelect, BoundText } from '@/components/form';
 import { Button, IconButton, Text } from '@/components/ui';
 import type { AnnotationValues } from '../annotation-values';
@@ -25,9 +26,11 @@ export function EvidenceFields({ control }: { control: Control<AnnotationValues>
           key={field.id}
           style={{
             display: 'grid',
-            gridTemplateColumns: 'minmax(0,1fr) minmax(0,1.4fr) auto',
+            gridTemplateColumns: 'minmax(0,1fr) auto',
             gap: 8,
             alignItems: 'start',
+            padding: '0 0 8px',
+            borderBottom: `1px solid ${color.lineHair}`,
           }}
         >
           <BoundSelect
@@ -37,6 +40,7 @@ export function EvidenceFields({ control }: { control: Control<AnnotationValues>
             quietLabel
             options={options}
           />
+          <IconButton icon={X} label={`Remove evidence ${place + 1}`} onPress={() => remove(place)} />
           <BoundText
             control={control}
             name={`evidence.${place}.reference`}
@@ -44,7 +48,6 @@ export function EvidenceFields({ control }: { control: Control<AnnotationValues>
             quietLabel
             placeholder="model, figure, DOI"
           />
-          <IconButton icon={X} label={`Remove evidence ${place + 1}`} onPress={() => remove(place)} />
         </div>
       ))}
       {fields.length < most ? (

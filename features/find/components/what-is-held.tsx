@@ -26,7 +26,9 @@ export function WhatIsHeld({ project, holdings, mayUpload }: WhatIsHeldProps) {
     <>
       <PageTitle
         quietOnPhone
-        action={hasRail && mayUpload ? <UploadButtons projectId={projectId} /> : undefined}
+        action={
+          hasRail && mayUpload ? <UploadButtons projectId={projectId} holdings={holdings} /> : undefined
+        }
       >
         What {project.name} holds
       </PageTitle>
@@ -75,15 +77,29 @@ export function WhatIsHeld({ project, holdings, mayUpload }: WhatIsHeldProps) {
   );
 }
 
-/** The two files a project is made of. */
-export function UploadButtons({ projectId }: { projectId: string }) {
+interface UploadButtonsProps {
+  projectId: string;
+  holdings: Pick<Holdings, 'alignments' | 'structures'>;
+}
+
+/** The two files a project is made of; the one that is still missing comes to the fore. */
+export function UploadButtons({ projectId, holdings }: UploadButtonsProps) {
   const { hasRail } = useLayout();
+  const needsStructure = holdings.alignments.length > 0 && holdings.structures.length === 0;
   return (
     <Row gap={8} style={{ flexGrow: 1 }}>
-      <Button href={newUploadPath(projectId, 'structure')} full={!hasRail}>
+      <Button
+        kind={needsStructure ? 'primary' : 'plain'}
+        href={newUploadPath(projectId, 'structure')}
+        full={!hasRail}
+      >
         Upload coordinates
       </Button>
-      <Button kind="primary" href={newUploadPath(projectId, 'alignment')} full={!hasRail}>
+      <Button
+        kind={needsStructure ? 'plain' : 'primary'}
+        href={newUploadPath(projectId, 'alignment')}
+        full={!hasRail}
+      >
         Upload an alignment
       </Button>
     </Row>

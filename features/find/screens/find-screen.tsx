@@ -42,7 +42,7 @@ function Find({ projectId }: { projectId: string }) {
   const actions = isEmpty ? (
     <NextStepButtons projectId={projectId} sample={sample} />
   ) : (
-    <UploadButtons projectId={projectId} />
+    <UploadButtons projectId={projectId} holdings={held ?? { alignments: [], structures: [] }} />
   );
   return (
     <Screen

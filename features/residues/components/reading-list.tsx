@@ -26,7 +26,19 @@ function Spelling({ text }: { text: string }) {
   );
 }
 
-function Group({ group, locator, id }: { group: ReadingGroup; locator: Locator; id: string }) {
+function Typed({ children }: { children: string }) {
+  return <b style={{ font: `600 14px/20px ${face.mono}` }}>{children}</b>;
+}
+
+interface GroupProps {
+  group: ReadingGroup;
+  /** There is no other reading: no narrower spelling is needed. */
+  isAlone: boolean;
+  locator: Locator;
+  id: string;
+}
+
+function Group({ group, isAlone, locator, id }: GroupProps) {
   const { box } = locator;
   return (
     <div role="group" aria-labelledby={id} style={{ marginTop: 12 }}>
@@ -44,7 +56,7 @@ function Group({ group, locator, id }: { group: ReadingGroup; locator: Locator; 
         }}
       >
         <span>{group.title}</span>
-        <Spelling text={group.spelling} />
+        {isAlone ? null : <Spelling text={group.spelling} />}
       </div>
       {group.readings.map(({ reading, at }) => (
         <ReadingOption
@@ -69,6 +81,13 @@ export function ReadingList({ locator }: { locator: Locator }) {
       {error && text.trim() !== '' ? <Banner kind="danger">{error.message}</Banner> : null}
       {isReading && !shown ? <Loading>{`Reading ${text}`}</Loading> : null}
       <div role="status" style={{ padding: '0 12px', font: `400 14px/22px ${face.text}` }}>
+        {text.trim() === '' ? (
+          <>
+            A family and a number: <Typed>cE59</Typed>, <Typed>βK158</Typed>, <Typed>Glu59</Typed>. A chain
+            and its author number: <Typed>K:59</Typed>. A change: <Typed>cE59Q</Typed>. One organism only:{' '}
+            <Typed>cE59 @ organism</Typed>.
+          </>
+        ) : null}
         {shown && count > 0 ? (
           <>
             <Mark tone="warn" icon={ListTree}>
@@ -90,7 +109,13 @@ export function ReadingList({ locator }: { locator: Locator }) {
       <div {...box.getMenuProps({ 'aria-label': 'Readings' })}>
         {shown
           ? groupReadings(found.readings).map((group, place) => (
-              <Group key={place} id={`${id}-${place}`} group={group} locator={locator} />
+              <Group
+                key={place}
+                id={`${id}-${place}`}
+                group={group}
+                isAlone={count === 1}
+                locator={locator}
+              />
             ))
           : null}
       </div>

@@ -1,8 +1,9 @@
 import type { Upload } from '@/shared/contracts/uploads';
-import { Banner } from '@/components/ui';
+import { Banner, countWords } from '@/components/ui';
+import { useAlignments } from '@/features/alignments';
 
 /** What became of the file, in a sentence or two. */
-export function UploadOutcome({ upload }: { upload: Upload }) {
+export function UploadOutcome({ projectId, upload }: { projectId: string; upload: Upload }) {
   const errors = upload.issues.filter(({ severity }) => severity === 'error').length;
   if (upload.state === 'refused') {
     return (
@@ -16,9 +17,19 @@ export function UploadOutcome({ upload }: { upload: Upload }) {
   return (
     <Banner kind="good">
       <b>{`Stored. ${upload.fileName} was read whole.`}</b>{' '}
-      {upload.kind === 'alignment'
-        ? 'Its rows are proteins of the family now.'
-        : 'Each of its protein chains is decided.'}
+      {upload.kind === 'alignment' ? (
+        <AlignmentTaken projectId={projectId} alignmentId={upload.alignmentId} />
+      ) : (
+        'Each of its protein chains is decided.'
+      )}
     </Banner>
   );
+}
+
+/** What came of the rows, counted as soon as the alignment is read. */
+function AlignmentTaken({ projectId, alignmentId }: { projectId: string; alignmentId: string | null }) {
+  const taken = useAlignments(projectId).data?.find(({ id }) => id === alignmentId);
+  if (!taken) return 'Its rows are proteins of the family now.';
+  const rows = countWords(taken.rowCount, 'row');
+  return `${rows}, ${countWords(taken.columnCount, 'column')}; each row is a protein of the family now.`;
 }

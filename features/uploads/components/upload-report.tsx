@@ -30,7 +30,7 @@ export function UploadReport({ projectId, upload, issues, openKey, onOpen }: Upl
         </Text>
       </div>
       <StageScale {...stageOf(upload)} label="Upload" />
-      <UploadOutcome upload={upload} />
+      <UploadOutcome projectId={projectId} upload={upload} />
       {hasRail ? (
         <Row wrap>
           <UploadNext projectId={projectId} upload={upload} />
