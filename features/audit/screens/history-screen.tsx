@@ -3,6 +3,7 @@ import type { AuditEntry } from '@/shared/contracts/audit';
 import { PageTitle, Screen } from '@/components/layout';
 import { Button, Empty, List, ListRow, Loading, NothingHere, Stack, Time } from '@/components/ui';
 import { settingsPath } from '@/client/paths';
+import { placeOfEntry } from '../place-of-entry';
 import { useRouteParams } from '@/client/use-route-params';
 import { actionWords } from '../action-words.data';
 import { useAudit } from '../use-audit';
@@ -31,6 +32,7 @@ function History({ projectId }: { projectId: string }) {
               <ListRow
                 title={`${entry.by.name} ${actionWords[entry.action] ?? entry.action}`}
                 detail={reasonOf(entry)}
+                href={placeOfEntry(projectId, entry)}
                 end={<Time iso={entry.at} />}
               />
             )}
@@ -46,9 +48,12 @@ function History({ projectId }: { projectId: string }) {
   );
 }
 
-/** The words a person gave with it, or the name of the file it was about. */
+/** What was changed, the words a person gave with it, the name of the file it was about. */
 function reasonOf({ after }: AuditEntry): string | undefined {
   if (typeof after !== 'object' || after === null) return undefined;
-  const { reason, fileName, name } = after as Record<string, unknown>;
-  return [reason, fileName, name].find((words): words is string => typeof words === 'string' && words !== '');
+  const { changes, reason, fileName, name } = after as Record<string, unknown>;
+  const words = [changes, reason, fileName, name].filter(
+    (one): one is string => typeof one === 'string' && one !== '',
+  );
+  return words.length > 0 ? words.join(', ') : undefined;
 }

@@ -2,22 +2,13 @@ import type { Thread } from '@/shared/contracts/threads';
 import { Plate, plateWords } from '@/components/residue';
 import { Banner, Button, counted, Empty, List, ListRow, Loading, Stack, Time } from '@/components/ui';
 import { threadPath } from '@/client/paths';
+import { lastWords } from '../last-words';
 import { useThreads } from '../use-threads';
 
 interface ThreadListProps {
   projectId: string;
   /** The open one, on a wide screen. */
   currentKey?: string;
-}
-
-/** The beginning of what was said last, without the marks of markdown. */
-export function lastWords({ lastMessage }: Thread): string {
-  if (!lastMessage) return 'nothing said yet';
-  const text = lastMessage.text
-    .replace(/[*_`>#[\]]+/g, '')
-    .replace(/\s+/g, ' ')
-    .trim();
-  return `${lastMessage.by.name}: ${text.length > 90 ? `${text.slice(0, 89).trimEnd()}…` : text}`;
 }
 
 function Row({ projectId, thread, selected }: { projectId: string; thread: Thread; selected: boolean }) {
