@@ -29,7 +29,7 @@ const moments: [table: string, rows: number][] = isFull
       ['upload', 1],
       ['upload', 3],
       ['alignment', 2],
-      ['numbering', 80],
+      ['numbering', 30],
       ['structure', 1],
       ['annotation', 2],
       ['message', 3],
