@@ -1,12 +1,7 @@
 import type { Upload } from '@/shared/contracts/uploads';
 import { Card, Link, Stack, StageScale, Text } from '@/components/ui';
 import { structurePath, uploadPath } from '@/client/paths';
-import { stageOf } from '@/features/uploads';
-
-const refusedWords = (errors: number): string =>
-  errors === 1
-    ? 'Refused with one error; nothing was stored.'
-    : `Refused with ${errors} errors; nothing was stored.`;
+import { errorWords, stageOf } from '@/features/uploads';
 
 /** Files on their way or refused: each with how far it is, and the page that says more. */
 export function UploadList({ projectId, uploads }: { projectId: string; uploads: readonly Upload[] }) {
@@ -14,7 +9,6 @@ export function UploadList({ projectId, uploads }: { projectId: string; uploads:
     <ul aria-label="Uploads">
       {uploads.map((upload) => {
         const { stages, stage, share, state, sentence } = stageOf(upload);
-        const errors = upload.issues.filter(({ severity }) => severity === 'error').length;
         const waits = state === 'waiting' && upload.structureId !== null;
         return (
           <li key={upload.id} style={{ paddingBottom: 8 }}>
@@ -26,7 +20,11 @@ export function UploadList({ projectId, uploads }: { projectId: string; uploads:
                   stage={stage}
                   share={share}
                   state={state}
-                  sentence={state === 'refused' ? refusedWords(errors) : sentence}
+                  sentence={
+                    state === 'refused'
+                      ? `Refused with ${errorWords(upload.issues)}; nothing was stored.`
+                      : sentence
+                  }
                   label={`Progress of ${upload.fileName}`}
                 />
                 {waits && upload.structureId ? (

@@ -1,15 +1,15 @@
 import type { Upload } from '@/shared/contracts/uploads';
 import { Banner, countWords } from '@/components/ui';
 import { useAlignments } from '@/features/alignments';
+import { errorWords } from '../error-words';
 
 /** What became of the file, in a sentence or two. */
 export function UploadOutcome({ projectId, upload }: { projectId: string; upload: Upload }) {
-  const errors = upload.issues.filter(({ severity }) => severity === 'error').length;
   if (upload.state === 'refused') {
     return (
       <Banner kind="danger">
-        <b>{`Not stored. ${upload.fileName} has ${errors === 1 ? 'an error' : `${errors} errors`}.`}</b>{' '}
-        Nothing of it was taken. The file is kept, so that you can look at it here.
+        <b>{`Not stored. ${upload.fileName} has ${errorWords(upload.issues)}.`}</b> Nothing of it was taken.
+        The file is kept, so that you can look at it here.
       </Banner>
     );
   }

@@ -1,4 +1,5 @@
 import type { Upload } from '@/shared/contracts/uploads';
+import { errorWords } from '@/features/uploads/error-words';
 import { excerptView } from '@/features/uploads/excerpt-view';
 import { fileSizeWords } from '@/features/uploads/file-size';
 import { stageOf } from '@/features/uploads/upload-stage';
@@ -106,4 +107,20 @@ describe('files before they are sent', () => {
     expect(whyNotSent('alignment', { name: 'c.afa', size: 65 * 1024 * 1024 })).toMatch(/more than the 64 MB/);
     expect(whyNotSent('structure', { name: 'r.pdb', size: 65 * 1024 * 1024 })).toBeNull();
   });
+});
+
+describe('how many errors a file has', () => {
+  const wrong = { code: 'letter-unknown', severity: 'error' as const, message: 'wrong' };
+  const doubt = { code: 'rows-equal', severity: 'warning' as const, message: 'doubt' };
+  const more = {
+    code: 'more-issues',
+    severity: 'error' as const,
+    message: '19800 more problems are not listed.',
+  };
+  it.each([
+    [[wrong, doubt], 'an error'],
+    [[wrong, wrong, doubt], '2 errors'],
+    [[wrong, wrong, more], '2 errors or more'],
+    [[wrong, { ...more, severity: 'warning' as const }], 'an error, and more'],
+  ])('%#', (issues, words) => expect(errorWords(issues)).toBe(words));
 });

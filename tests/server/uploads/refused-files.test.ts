@@ -142,8 +142,11 @@ describe('a file that cannot be used', () => {
     );
     const upload = await lead.settled(projectId, body.id);
     expect(upload.state).toBe('refused');
-    expect(upload.issues).toHaveLength(200);
-    expect(upload.issues.at(-1)?.code).toBe('more-issues');
+    expect(upload.issues.slice(0, -1)).toHaveLength(200);
+    // Each row has a wrong letter, 343 of the 400 another length than most: 200 are listed.
+    const last = upload.issues.at(-1);
+    expect(last?.code).toBe('more-issues');
+    expect(Number(/^(\d+) more problems/.exec(last?.message ?? '')?.[1])).toBeGreaterThanOrEqual(500);
   });
 });
 
