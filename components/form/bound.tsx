@@ -1,6 +1,7 @@
 import {
   useController,
   type Control,
+  type FieldError,
   type FieldPath,
   type FieldPathByValue,
   type FieldValues,
@@ -35,6 +36,12 @@ type TextName<Values extends FieldValues> = FieldPathByValue<Values, string | un
 type Bound<Part, Values extends FieldValues, Name extends FieldPath<Values>, Sent> = Omit<Part, FromForm> &
   TextBinding<Values, Name, Sent>;
 
+/** What is wrong with a field; where it is read as a list, what is wrong first in the list. */
+function messageOf(error: FieldError): string | undefined {
+  const errors: readonly (FieldError | undefined)[] = Array.isArray(error) ? error : [error];
+  return errors.find((one) => one !== undefined)?.message;
+}
+
 /** What is written in the field, what becomes of a change, and what is wrong with it. */
 function useText<Values extends FieldValues, Name extends FieldPath<Values>, Sent>(
   binding: TextBinding<Values, Name, Sent>,
@@ -47,7 +54,7 @@ function useText<Values extends FieldValues, Name extends FieldPath<Values>, Sen
     onBlur: field.onBlur,
     value: String(field.value ?? ''),
     onChange: (text: string) => field.onChange(emptyIsNone ? text || undefined : text),
-    error: error || (fieldState.error && (wrongWords ?? fieldState.error.message)),
+    error: error || (fieldState.error && (wrongWords ?? messageOf(fieldState.error))),
   };
 }
 
