@@ -63,7 +63,11 @@ export class ModelSelection {
       const listed = this.numbers.slice(0, 20).join(', ');
       const text = `There is no model ${this.wanted}; the file holds ${this.count}: ${listed}.`;
       this.issues.error('model-not-found', text);
-    } else this.issues.error('no-atoms', 'The file holds no atom that can be read.');
+    } else
+      this.issues.error(
+        'no-atoms',
+        'The file holds no atom that can be read. Choose the file with the ATOM lines.',
+      );
     return false;
   }
 
