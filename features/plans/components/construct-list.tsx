@@ -7,7 +7,12 @@ import type { Construct } from '@/shared/contracts/plans';
 interface ConstructListProps {
   projectId: string;
   constructs: readonly Construct[];
-  partOf: (familyId: string) => Part;
+  /** Undefined until the families are read: no colour is better than a wrong one. */
+  partOf: (familyId: string) => Part | undefined;
+}
+
+function Tag({ family, part }: { family: string; part: Part | undefined }) {
+  return part ? <FamilyTag family={family} part={part} /> : <span style={{ width: 36 }}>{family}</span>;
 }
 
 /** The lab's DNA: what it encodes, how long it is. */
@@ -16,7 +21,7 @@ export function ConstructList({ projectId, constructs, partOf }: ConstructListPr
     <List label="Constructs" rows={constructs} keyOf={({ id }) => id}>
       {(construct) => (
         <ListRow
-          lead={<FamilyTag family={construct.family} part={partOf(construct.familyId)} />}
+          lead={<Tag family={construct.family} part={partOf(construct.familyId)} />}
           title={construct.name}
           detail={
             <>

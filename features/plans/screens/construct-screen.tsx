@@ -89,10 +89,10 @@ function OpenConstruct({ projectId, construct, mutants }: OpenConstructProps) {
       kind="panes"
       actions={action}
       items={[
+        { key: 'numbering', label: 'Numbering', value: protein?.preferredNumbering ?? '' },
         { key: 'construct', label: 'Construct', value: `${construct.name}, ${size} bp` },
         { key: 'code', label: 'Code', value: geneticCodeWords(construct.geneticCode) },
         { key: 'coding', label: 'Coding part', value: `bases ${coding}, from 1` },
-        { key: 'numbering', label: 'Numbering', value: protein?.preferredNumbering ?? '' },
       ]}
     >
       <Panes

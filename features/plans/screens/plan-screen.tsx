@@ -99,7 +99,7 @@ function Constructs({ projectId, constructs }: { projectId: string; constructs: 
         <ConstructList
           projectId={projectId}
           constructs={constructs}
-          partOf={(familyId) => families?.find(({ id }) => id === familyId)?.part ?? 'other'}
+          partOf={(familyId) => families?.find(({ id }) => id === familyId)?.part}
         />
       ) : (
         <Empty title="No construct yet">
