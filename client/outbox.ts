@@ -64,7 +64,7 @@ export class Outbox {
   close(): void {
     this.account = null;
     this.lanes = new Map();
-    for (const pause of this.running.values()) pause.wake();
+    this.endWaits();
     this.running.clear();
     this.changes.emit();
   }
@@ -111,8 +111,12 @@ export class Outbox {
 
   /** The line is back: nothing waits for the clock. */
   wake(): void {
-    for (const pause of this.running.values()) pause.wake();
+    this.endWaits();
     for (const lane of this.lanes.keys()) void this.run(lane);
+  }
+
+  private endWaits(): void {
+    for (const pause of this.running.values()) pause.wake();
   }
 
   private async load(account: string): Promise<void> {
@@ -155,6 +159,7 @@ export class Outbox {
         await this.tools.giveBack(account, message);
       } else {
         await this.tools.send(message);
+        this.endWaits(); // taken: so the others may try as well
       }
       await this.drop(message.clientKey, account);
       return null;

@@ -17,8 +17,8 @@ export interface SessionActs {
   signOut: () => Promise<void>;
 }
 
-// Shorter than the time for which the server takes a token whose successor got lost on the way.
-const waits = { firstMilliseconds: 500, mostMilliseconds: 6000 };
+// Several tries within the time for which the server takes a token whose successor got lost on the way.
+const waits = { firstMilliseconds: 500, mostMilliseconds: 3000 };
 
 export function createSession(access: Access, { call, renewal }: Pick<Api, 'call' | 'renewal'>): SessionActs {
   const pause = new Pause();

@@ -29,6 +29,7 @@ interface StoredRow {
 class Writer {
   page: ClientPage;
   reloads = 0;
+  signedOut = 0;
   readonly written: { text: string; subject: Subject; clientKey: string }[] = [];
 
   constructor(
@@ -39,18 +40,29 @@ class Writer {
     this.page = new ClientPage(device);
   }
 
+  /** Signs in as somebody does at the form: again and again until it is done. */
   async signIn(): Promise<void> {
     const body = { email: this.person.email, password: 'a long enough password' };
-    const reply = await this.page.api.call(auth.signIn, { body });
-    this.page.access.accept(reply);
-    await this.page.open();
+    for (;;) {
+      const reply = await this.page.api.call(auth.signIn, { body }).catch(() => null);
+      if (reply) {
+        this.page.access.begin();
+        this.page.access.accept(reply);
+        return this.page.open();
+      }
+      await pause(200);
+    }
   }
 
   async reload(): Promise<void> {
     this.reloads += 1;
     this.page.close();
     this.page = new ClientPage(this.device);
-    await this.page.open();
+    const isBack = await this.page.restore();
+    if (isBack) return this.page.open();
+    // What is unsent waits on the device for the same person.
+    this.signedOut += 1;
+    return this.signIn();
   }
 
   async write(text: string, subject: Subject): Promise<void> {
@@ -141,6 +153,7 @@ test(`${size.messages} messages, ${size.kills} server kills: one list on both cl
   report(
     `${stored.length} stored of ${sent.length} written in ${(underFire / 1000).toFixed(1)} s; ` +
       `${size.kills} kills; cuts ${sum((line) => line.cuts)}, reloads ${writers.map(({ reloads }) => reloads).join(' + ')}, ` +
+      `signed out ${writers.map(({ signedOut }) => signedOut).join(' + ')}, ` +
       `requests lost ${sum((line) => line.requestsLost)}, replies lost ${sum((line) => line.repliesLost)} ` +
       `(${sum((line) => line.donesLost)} of them after the server had written); outboxes empty after ${emptied} ms, both equal after ${converged} ms`,
   );

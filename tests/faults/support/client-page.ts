@@ -81,11 +81,15 @@ export class ClientPage {
     this.realtime.onJoined.subscribe((_, head) => this.stream.joined(head));
   }
 
-  /** Takes up the session, reads the project and its threads, and follows it. */
+  /** Takes up the session that the cookie holds; false when it is lost. */
+  async restore(): Promise<boolean> {
+    await createSession(this.access, this.api).restore();
+    return this.access.person !== null;
+  }
+
+  /** Reads the project and its threads, and follows it. */
   async open(): Promise<void> {
     const { projectId, subjects } = this.device;
-    await createSession(this.access, this.api).restore();
-    if (this.access.person === null) throw new Error('The session is lost.');
     const project = await this.queryClient.fetchQuery({
       queryKey: ['project', projectId],
       queryFn: () => this.api.call(projects.read, { params: { projectId } }),
