@@ -202,5 +202,45 @@ describe.each([phone, wide])('the demo on a $name screen', (size) => {
         await see(button(pin, /^Edit: /), button(pin, /^Contest: /), button(pin, /^Retire: /));
       }),
     );
+
+    test(
+      'sets a numbering that the passport then names',
+      walk(async (page) => {
+        const organism = isPhone ? 'Nerivola profunda' : 'Cryorota nivalis';
+        await toPlace(page, 'Find');
+        await link(page.getByRole('list', { name: 'Families' }), /^family c, /).click();
+        await link(page, organism).click();
+        await field(page, 'Name').fill('tagged');
+        await page.getByRole('radio', { name: 'by offset' }).click();
+        await field(page, 'Added to the place in the sequence').fill('20');
+        await page.getByRole('checkbox', { name: /^Show this numbering first/ }).uncheck();
+        await button(page, 'Save the numbering').click();
+        await see(page.getByText(/^Saved\./));
+        await field(page, 'Go to residue number, sequence numbering').fill('5');
+        await button(page, 'Go').click();
+        const passport = await facts(page.getByRole('region', { name: 'Passport' }).locator('dl'));
+        expect(passport['tagged']).toMatch(/^[A-Z][a-z]{2}25$/);
+      }),
+    );
+
+    test(
+      'pins, accepts and retires',
+      walk(async (page) => {
+        await (isPhone ? button(page, 'Pin here') : button(page, 'Pin')).click();
+        const form = page.getByRole('dialog', { name: 'Pin here' });
+        await field(form, 'What is known').fill('Far from the membrane.');
+        await button(form, 'Pin').click();
+        await gone(form);
+        const pins = page.getByRole('region', { name: 'Pins' });
+        await button(pins, 'Accept: note, Far from the membrane.').click();
+        await see(pins.getByRole('article', { name: 'note, accepted', exact: true }));
+        await button(pins, /^What can be done with: note, Far/).click();
+        await button(pins, /^Retire: note, Far/).click();
+        const retire = page.getByRole('dialog', { name: 'Retire this pin?' });
+        await field(retire, 'Reason').fill('Only tried out.');
+        await button(retire, 'Retire').click();
+        await see(button(pins, 'Show 1 retired'));
+      }),
+    );
   });
 });

@@ -39,19 +39,26 @@ async function faultsOf(visitor: Visitor): Promise<string[]> {
   return [...faults, ...visitor.complaints.splice(0)];
 }
 
-async function takePicture({ page, size }: Visitor, name: string, theme: Theme): Promise<void> {
-  if (!takesPictures) return;
-  await page.screenshot({ path: path.join(pictures, `${name}-${size.name}-${theme}.png`) });
+/** A theme is one attribute of the document: the page in front changes it without being read again. */
+async function show(visitor: Visitor, theme: Theme): Promise<void> {
+  await visitor.page.evaluate((chosen) => (document.documentElement.dataset.theme = chosen), theme);
 }
 
-/** Goes through all screens in one look, and gives what is wrong with each. */
-async function lookAtAll(size: Size, theme: Theme): Promise<Record<string, string[]>> {
-  const visitor = await Visitor.at(stage.browser, stage.server.origin, size, theme);
+/** Goes through all screens at one size, in both themes, and gives what is wrong with each. */
+async function lookAtAll(size: Size): Promise<Record<string, string[]>> {
+  const visitor = await Visitor.at(stage.browser, stage.server.origin, size, 'light');
   const found: Record<string, string[]> = {};
-  const look = async (name: string, more: string[] = []) => {
-    const faults = [...more, ...(await faultsOf(visitor))];
-    if (faults.length > 0) found[name] = faults;
-    await takePicture(visitor, name, theme);
+  const note = (what: string, faults: string[]) => {
+    if (faults.length > 0) found[what] = faults;
+  };
+  const look = async (name: string) => {
+    for (const theme of ['light', 'dark'] as const) {
+      await show(visitor, theme);
+      note(`${name}, ${theme}`, await faultsOf(visitor));
+      const file = path.join(pictures, `${name}-${size.name}-${theme}.png`);
+      if (takesPictures) await visitor.page.screenshot({ path: file });
+    }
+    await show(visitor, 'light');
   };
   for (const screen of screens.filter(({ isOutside }) => isOutside)) {
     await arrive(visitor, screen);
@@ -60,8 +67,8 @@ async function lookAtAll(size: Size, theme: Theme): Promise<Record<string, strin
   await enterDemo(visitor, 'Anouk Verrin');
   for (const screen of screens.filter(({ isOutside }) => !isOutside)) {
     await arrive(visitor, screen);
-    const isOnce = size === phone && theme === 'light';
-    await look(screen.name, isOnce ? await sidewaysBetween(visitor, screen) : []);
+    await look(screen.name);
+    if (size === phone) note(`${screen.name}, other widths`, await sidewaysBetween(visitor, screen));
     if (screen.name === 'residue') {
       await visitor.page.keyboard.press('p');
       await see(button(visitor.page.getByRole('dialog', { name: 'Pin here' }), 'Add evidence'));
@@ -86,11 +93,18 @@ async function sidewaysBetween(visitor: Visitor, { says }: Screen): Promise<stri
   return found;
 }
 
+test('no screen has a fault, on a phone or wide, light or dark', async () => {
+  const [onPhone, onWide] = await Promise.all([lookAtAll(phone), lookAtAll(wide)]);
+  expect(onPhone).toEqual({});
+  expect(onWide).toEqual({});
+});
+
 test.each(['light', 'dark'] as const)(
-  'in the %s theme no screen has a fault, on a phone or wide',
+  'the %s theme that was chosen is there from the first paint',
   async (theme) => {
-    const [onPhone, onWide] = await Promise.all([lookAtAll(phone, theme), lookAtAll(wide, theme)]);
-    expect(onPhone).toEqual({});
-    expect(onWide).toEqual({});
+    const visitor = await Visitor.at(stage.browser, stage.server.origin, phone, theme);
+    await visitor.go('/sign-in');
+    expect(await visitor.page.evaluate(() => document.documentElement.dataset.theme)).toBe(theme);
+    await visitor.close();
   },
 );
