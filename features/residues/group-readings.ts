@@ -18,6 +18,22 @@ export function groupReadings(readings: readonly Reading[]): ReadingGroup[] {
   return groups;
 }
 
+/** Why it is a reading, clause by clause; the numbering stands beside the name already. */
+const clausesOf = ({ reason, residue }: Reading): string[] =>
+  reason.split('; ').filter((clause) => clause !== residue.numbering);
+
+/** What all readings under a heading are read by is said once there; the rest stands with each. */
+export function reasonsOf({ readings }: ReadingGroup): { shared: string; own: string[] } {
+  const all = readings.map(({ reading }) => clausesOf(reading));
+  const [first = [], ...others] = all;
+  const shared =
+    others.length === 0 ? [] : first.filter((clause) => others.every((one) => one.includes(clause)));
+  return {
+    shared: shared.join('; '),
+    own: all.map((clauses) => clauses.filter((clause) => !shared.includes(clause)).join('; ')),
+  };
+}
+
 /** The one reading that may be opened without choosing: the only one there is, with the letter that stands there. */
 export function onlyReading(found: { readings: readonly Reading[]; more: boolean }): Reading | null {
   const [only] = found.readings;

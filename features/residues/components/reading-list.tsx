@@ -2,7 +2,7 @@ import { useId } from 'react';
 import ListTree from 'lucide-react-native/icons/list-tree';
 import { color, face } from '@/components/theme';
 import { Banner, counted, Loading, Mark, Text } from '@/components/ui';
-import { groupReadings, type ReadingGroup } from '../group-readings';
+import { groupReadings, reasonsOf, type ReadingGroup } from '../group-readings';
 import type { Locator } from '../use-locator';
 import { ReadingOption } from './reading-option';
 
@@ -40,6 +40,7 @@ interface GroupProps {
 
 function Group({ group, isAlone, locator, id }: GroupProps) {
   const { box } = locator;
+  const { shared, own } = reasonsOf(group);
   return (
     <div role="group" aria-labelledby={id} style={{ marginTop: 12 }}>
       <div
@@ -55,13 +56,19 @@ function Group({ group, isAlone, locator, id }: GroupProps) {
           font: `600 14px/22px ${face.text}`,
         }}
       >
-        <span>{group.title}</span>
+        <span>
+          {group.title}
+          {shared ? (
+            <span style={{ display: 'block', fontWeight: 400, color: color.inkSoft }}>{shared}</span>
+          ) : null}
+        </span>
         {isAlone ? null : <Spelling text={group.spelling} />}
       </div>
-      {group.readings.map(({ reading, at }) => (
+      {group.readings.map(({ reading, at }, place) => (
         <ReadingOption
           key={at}
           reading={reading}
+          why={own[place] ?? ''}
           highlighted={box.highlightedIndex === at}
           option={box.getItemProps({ item: reading, index: at })}
         />

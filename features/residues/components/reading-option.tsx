@@ -20,18 +20,16 @@ const frame = (on: boolean): CSSProperties => ({
 
 interface ReadingOptionProps {
   reading: Reading;
+  /** Why it is a reading, as far as the heading does not say it. */
+  why: string;
   highlighted: boolean;
   /** What makes it an option of the list. */
   option: HTMLAttributes<HTMLElement>;
 }
 
 /** One thing the text can mean: which residue, why it is a reading, how many pins are there. */
-export function ReadingOption({ reading, highlighted, option }: ReadingOptionProps) {
-  const { residue, mutationTo, mismatch, reason, pinCount } = reading;
-  // The numbering stands beside the name already.
-  const why = reason.startsWith(`${residue.numbering}; `)
-    ? reason.slice(residue.numbering.length + 2)
-    : reason;
+export function ReadingOption({ reading, why, highlighted, option }: ReadingOptionProps) {
+  const { residue, mutationTo, mismatch, pinCount } = reading;
   return (
     <div {...option} style={frame(highlighted)}>
       <Plate size={32} {...plateWords(residue)} becomes={mutationTo ?? undefined} />
@@ -42,7 +40,7 @@ export function ReadingOption({ reading, highlighted, option }: ReadingOptionPro
             {residue.numbering}, <em>{residue.organism}</em>
           </span>
         </div>
-        <div style={{ color: color.inkSoft }}>{why}</div>
+        {why ? <div style={{ color: color.inkSoft }}>{why}</div> : null}
         {mismatch ? <Mark tone="warn">{mismatch}</Mark> : null}
       </div>
       <span style={{ color: color.inkSoft, whiteSpace: 'nowrap' }}>{countWords(pinCount, 'pin')}</span>

@@ -1,6 +1,6 @@
 import type { Passport, Reading } from '@/shared/contracts/residues';
 import { columnRows, letterShares } from '@/features/residues/column-rows';
-import { groupReadings, onlyReading } from '@/features/residues/group-readings';
+import { groupReadings, onlyReading, reasonsOf } from '@/features/residues/group-readings';
 import { passportRows, passportText } from '@/features/residues/passport-text';
 
 const id = (number: number) => `01a2320f-b4b6-7638-92fa-${String(number).padStart(12, '0')}`;
@@ -28,6 +28,18 @@ const reading = (over: Partial<Reading> = {}): Reading => ({
 });
 
 describe('the readings of an address', () => {
+  it('say once what all under a heading are read by, and each what is its own', () => {
+    const [group] = groupReadings([
+      reading({ reason: 'mature; c is family c' }),
+      reading({ reason: 'sequence 62 is mature 61; c is family c' }),
+    ]);
+    const [alone] = groupReadings([reading({ reason: 'mature; c is family c' })]);
+    expect([group && reasonsOf(group), alone && reasonsOf(alone)]).toEqual([
+      { shared: 'c is family c', own: ['', 'sequence 62 is mature 61'] },
+      { shared: '', own: ['c is family c'] },
+    ]);
+  });
+
   it('keep the order they were ranked in, each under its heading', () => {
     const list = [reading(), reading(), reading({ group: 'Amino acid Cys' }), reading({ mismatch: 'says' })];
     const groups = groupReadings(list);
