@@ -70,10 +70,6 @@ export function OffsetForm({ projectId, protein, numbering }: OffsetFormProps) {
   const busyText = act.isPending ? 'Saving' : undefined;
   return (
     <Form onSubmit={() => save(base)}>
-      {act.error && !theirs ? <Banner kind="danger">{act.error.message}</Banner> : null}
-      {act.isSuccess && !isDirty ? (
-        <Banner kind="good">{`Saved. Every screen shows ${values.name} numbers where it is preferred.`}</Banner>
-      ) : null}
       <BoundText
         control={control}
         name="name"
@@ -136,6 +132,11 @@ export function OffsetForm({ projectId, protein, numbering }: OffsetFormProps) {
         label="Show this numbering first"
         hint="For everybody, on every protein of this family that has one of this name."
       />
+      {/* Beside the button that was pressed: the beginning of the form is out of sight by then. */}
+      {act.error && !theirs ? <Banner kind="danger">{act.error.message}</Banner> : null}
+      {act.isSuccess && !isDirty ? (
+        <Banner kind="good">{`Saved. Every screen shows ${values.name} numbers where it is preferred.`}</Banner>
+      ) : null}
       {theirs ? (
         <BothTexts
           sentence="Somebody changed this protein meanwhile."
