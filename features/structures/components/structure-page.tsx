@@ -79,10 +79,10 @@ export function StructurePage({ projectId, structure, families }: StructurePageP
       backHref={findPath(projectId)}
       kind="panes"
       items={[
+        { key: 'numbers', label: 'Chain numbers', value: 'author' },
         { key: 'file', label: 'File', value: `${structure.name}, revision ${structure.revision}` },
         { key: 'chains', label: 'Chains', value: structure.chainCount },
         { key: 'waiting', label: 'Waiting', value: structure.waiting },
-        { key: 'numbers', label: 'Chain numbers', value: 'author' },
       ]}
       actions={confirm(true)}
     >

@@ -37,13 +37,9 @@ function OneThread({ projectId, subjectKey, subject }: OneThreadProps) {
   useKeys({ r: () => frame.current?.querySelector('textarea')?.focus() });
   const residue = thread.data?.residue;
   const items = [
+    ...(residue ? [{ key: 'numbering', label: 'Numbering', value: residue.numbering }] : []),
     { key: 'on', label: 'On', value: thread.data?.caption ?? 'reading' },
-    ...(residue
-      ? [
-          { key: 'numbering', label: 'Numbering', value: residue.numbering },
-          { key: 'organism', label: 'Organism', value: <em>{residue.organism}</em> },
-        ]
-      : []),
+    ...(residue ? [{ key: 'organism', label: 'Organism', value: <em>{residue.organism}</em> }] : []),
   ];
   // The thread is known or told missing here; the panel below shows the rest.
   const log = (

@@ -23,9 +23,15 @@ export function ThreadsScreen() {
       <ThreadList projectId={params.projectId} />
     </>
   );
-  if (!hasRail) return <Screen title="Threads">{list}</Screen>;
+  const items = [{ key: 'numbering', label: 'Numbering', value: 'as each protein prefers' }];
+  if (!hasRail)
+    return (
+      <Screen title="Threads" items={items}>
+        {list}
+      </Screen>
+    );
   return (
-    <Screen kind="panes" title="Threads">
+    <Screen kind="panes" title="Threads" items={items}>
       <Panes
         name="threads"
         panes={[
