@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import './plain-words';
 
 /** In lower case, so that one thing has one id wherever ids are compared as text. */
 export const id = z.uuid().toLowerCase();

@@ -1,5 +1,5 @@
 import type { ChainMap } from '@/shared/contracts/maps';
-import { countWords, KeyValueList, KeyValueRow, Link, Stack } from '@/components/ui';
+import { countWords, KeyValueList, KeyValueRow, Link, Row, Stack, Text } from '@/components/ui';
 import { proteinPath } from '@/client/paths';
 import { authorShift, CoverageStrip, percentWords, shiftWords, stretchWords } from '@/features/maps';
 import { runnerUpName, runnerUpWords } from '../chain-words';
@@ -12,7 +12,20 @@ export function ChainFacts({ projectId, chain }: { projectId: string; chain: Cha
   const isMapped = proteinId !== null && segments.length > 0;
   return (
     <Stack gap={8}>
-      {isMapped ? <CoverageStrip segments={segments} proteinLength={proteinLength} /> : null}
+      {isMapped ? (
+        <div>
+          <CoverageStrip segments={segments} proteinLength={proteinLength} />
+          <Row justify="between">
+            <Text kind="meta" tone="soft">
+              1
+            </Text>
+            <Text
+              kind="meta"
+              tone="soft"
+            >{`${proteinLength ?? ''}, places in the sequence of the protein`}</Text>
+          </Row>
+        </div>
+      ) : null}
       <KeyValueList label="The chain and its protein">
         {proteinId === null ? null : (
           <KeyValueRow

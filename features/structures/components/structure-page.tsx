@@ -51,6 +51,7 @@ export function StructurePage({ projectId, structure, families }: StructurePageP
         onOpen={({ first }) => router.setParams({ chain: first.authorId })}
         mayConfirm={mayConfirm}
         problem={confirmReady.error?.message ?? null}
+        isConfirmed={confirmReady.isSuccess && ready === 0}
         uploadHref={upload && uploadPath(projectId, upload.id)}
         confirm={confirm(false)}
       />

@@ -7,11 +7,14 @@ import { countOf, standings } from '@/features/maps';
 import { FoundWhileReading } from '@/features/uploads';
 import { ChainList, type ChainsProps } from './chain-list';
 import { ChainTable } from './chain-table';
+import { JustConfirmed } from './just-confirmed';
 
 interface StructureReportProps extends ChainsProps {
   structure: StructureWithChains;
   mayConfirm: boolean;
   problem: string | null;
+  /** Whether chains were confirmed just now. */
+  isConfirmed: boolean;
   /** The upload it came with, where its warnings stand beside the text of the file. */
   uploadHref: string | undefined;
   /** The main button, on a wide screen. */
@@ -20,12 +23,13 @@ interface StructureReportProps extends ChainsProps {
 
 /** A structure, how far its map is confirmed, and its chains in the order in which they need a person. */
 export function StructureReport(props: StructureReportProps) {
-  const { structure, mayConfirm, problem, uploadHref, confirm, groups } = props;
+  const { structure, mayConfirm, problem, isConfirmed, uploadHref, confirm, groups } = props;
   const layout = useLayout();
   const { name, revision, title, fileName, by, at, waiting, chains, issues } = structure;
   const proteinCount = chains.filter(({ status }) => status !== null).length;
   const share = proteinCount === 0 ? 0 : (proteinCount - waiting) / proteinCount;
   const isDone = waiting === 0;
+  const example = chains.find(({ status }) => status === 'confirmed');
   const counts = standings
     .map((standing) => ({ standing, count: countOf(groups, standing) }))
     .filter(({ count }) => count > 0)
@@ -48,6 +52,9 @@ export function StructureReport(props: StructureReportProps) {
         sentence={isDone ? undefined : waitingWords(waiting, mayConfirm)}
       />
       {problem ? <Banner kind="danger">{problem}</Banner> : null}
+      {isConfirmed && example ? (
+        <JustConfirmed example={`${example.authorId}:${example.firstLabel}`} />
+      ) : null}
       {layout.hasRail && confirm ? <Row>{confirm}</Row> : null}
       <Stack gap={4}>
         <Caption count={counts}>Chains</Caption>
