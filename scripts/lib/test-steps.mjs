@@ -21,7 +21,7 @@ export const steps = [
   { name: 'api', run: jest('api'), needs: ['database'] },
   { name: 'build', run: build },
   { name: 'flows', run: jest('flows', '--runInBand'), needs: ['database', 'chromium', 'client'] },
-  { name: 'faults', run: jest('faults', '--runInBand'), needs: ['database', 'client'], durable: true },
+  { name: 'faults', run: jest('faults', '--runInBand'), needs: ['database'], durable: true },
   { name: 'fuzz', run: jest('fuzz', '--runInBand'), needs: ['database'] },
 ];
 

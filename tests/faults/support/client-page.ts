@@ -1,5 +1,5 @@
 // One person's browser: the product's own client parts, on a line that may fail, with what a device keeps between pages.
-import { QueryObserver } from '@tanstack/react-query';
+import { QueryObserver, type QueryClient } from '@tanstack/react-query';
 import { Access } from '@/client/access';
 import { createApi, type Api } from '@/client/api';
 import { LiveProjects } from '@/client/live-projects';
@@ -43,12 +43,19 @@ const threadQuery = (call: Api['call'], projectId: string, of: Subject) =>
     merge: mergeThread,
   });
 
+/** A query that ends after its page would wait half an hour to be forgotten, and hold up the end of the tests. */
+function withoutTimers(client: QueryClient): QueryClient {
+  const { queries, ...rest } = client.getDefaultOptions();
+  client.setDefaultOptions({ ...rest, queries: { ...queries, gcTime: Infinity } });
+  return client;
+}
+
 export class ClientPage {
   readonly access = new Access();
   readonly api: Api;
   readonly realtime: Realtime;
   readonly outbox: Outbox;
-  readonly queryClient = makeQueryClient();
+  readonly queryClient = withoutTimers(makeQueryClient());
   readonly liveProjects: LiveProjects;
   private readonly stream: ProjectStream;
   private readonly gone = new AbortController();
