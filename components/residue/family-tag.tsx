@@ -29,7 +29,7 @@ export function FamilyTag({ family, part, size = 32, href }: FamilyTagProps) {
   );
   if (href) {
     return (
-      <Link href={href} className="plate plate-link" style={style}>
+      <Link href={href} className="plate plate-link family-link" style={style}>
         {content}
       </Link>
     );

@@ -66,9 +66,12 @@ function lineOf(key: string, group: readonly Check[]): CheckLine {
     result,
     name,
     value: `${shown.join(' and ')}${unit ? ` ${unit}` : ''}`,
-    limit: `${where}limit: ${first?.limit ?? 'none'} · ${first?.basis ?? ''}`,
+    limit: `${where}limit: ${minusSigns(first?.limit ?? 'none')} · ${first?.basis ?? ''}`,
   };
 }
+
+/** Limits are written with the same minus as the figures beside them. */
+const minusSigns = (limit: string): string => limit.replace(/(?<!\S)-(?=\d)/g, '−');
 
 /** `11 passed, 1 to look at`. */
 export function summaryOf(lines: readonly Pick<CheckLine, 'result'>[]): string {

@@ -39,7 +39,9 @@ export function AccountForm(props: AccountFormProps) {
         <Form onSubmit={onSubmit}>{children}</Form>
         <Row justify="between">
           <Text>{other.question}</Text>
-          <Link href={other.href}>{other.label}</Link>
+          <Link href={other.href} className="lone-link">
+            {other.label}
+          </Link>
         </Row>
       </Stack>
     </EntryFrame>

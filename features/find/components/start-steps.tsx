@@ -50,7 +50,13 @@ export function StartSteps({ steps }: { steps: readonly StartStep[] }) {
                 color: state === 'later' ? color.inkSoft : color.ink,
               }}
             >
-              {href ? <Link href={href}>{title}</Link> : title}
+              {href ? (
+                <Link href={href} className="lone-link">
+                  {title}
+                </Link>
+              ) : (
+                title
+              )}
             </p>
             <p style={{ overflowWrap: 'anywhere' }}>{detail}</p>
           </div>

@@ -14,7 +14,9 @@ export function UploadList({ projectId, uploads }: { projectId: string; uploads:
           <li key={upload.id} style={{ paddingBottom: 8 }}>
             <Card>
               <Stack gap={8}>
-                <Link href={uploadPath(projectId, upload.id)}>{upload.fileName}</Link>
+                <Link href={uploadPath(projectId, upload.id)} className="lone-link">
+                  {upload.fileName}
+                </Link>
                 <StageScale
                   stages={stages}
                   stage={stage}
@@ -28,7 +30,9 @@ export function UploadList({ projectId, uploads }: { projectId: string; uploads:
                   label={`Progress of ${upload.fileName}`}
                 />
                 {waits && upload.structureId ? (
-                  <Link href={structurePath(projectId, upload.structureId)}>Confirm its chains</Link>
+                  <Link href={structurePath(projectId, upload.structureId)} className="lone-link">
+                    Confirm its chains
+                  </Link>
                 ) : null}
                 <Text kind="meta" tone="soft">{`${upload.kind}, from ${upload.by.name}`}</Text>
               </Stack>

@@ -73,7 +73,8 @@ export function ConstructFields({ projectId, form }: ConstructFieldsProps) {
               onChange={(value) => field.onChange(value === 'circular')}
             />
             <Text kind="small" tone="soft">
-              Second places for a primer are looked for in the whole circle only when it is all here.
+              A whole plasmid is searched for other places where a primer would bind; a piece only within
+              itself.
             </Text>
           </Stack>
         )}

@@ -24,7 +24,9 @@ export function NewProjectScreen() {
           )}
         </ReadView>
         <p>
-          <Link href={projectsPath()}>My projects</Link>
+          <Link href={projectsPath()} className="lone-link">
+            My projects
+          </Link>
         </p>
       </Stack>
     </EntryFrame>

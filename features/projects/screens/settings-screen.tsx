@@ -45,10 +45,14 @@ function Settings({ projectId }: { projectId: string }) {
           </Banner>
         )}
         <p>
-          <Link href={peoplePath(projectId)}>People and what they may do</Link>
+          <Link href={peoplePath(projectId)} className="lone-link">
+            People and what they may do
+          </Link>
         </p>
         <p>
-          <Link href={historyPath(projectId)}>History: who did what</Link>
+          <Link href={historyPath(projectId)} className="lone-link">
+            History: who did what
+          </Link>
         </p>
       </Stack>
     </Screen>

@@ -30,7 +30,11 @@ export function ChainFacts({ projectId, chain }: { projectId: string; chain: Cha
         {proteinId === null ? null : (
           <KeyValueRow
             name="protein"
-            value={<Link href={proteinPath(projectId, proteinId)}>{chain.organism}</Link>}
+            value={
+              <Link href={proteinPath(projectId, proteinId)} className="lone-link">
+                {chain.organism}
+              </Link>
+            }
           />
         )}
         {identity === null ? null : <KeyValueRow name="identity" mono value={percentWords(identity)} />}

@@ -24,7 +24,7 @@ test('both primers stand in one line; the worse result counts and says whose it 
     result: 'failed',
     name: 'Self dimer',
     value: '−4.6 and −9.4 kcal/mol',
-    limit: 'only E62Q_R · limit: look below -6 · common practice, no source',
+    limit: 'only E62Q_R · limit: look below −6 · common practice, no source',
   });
 });
 
