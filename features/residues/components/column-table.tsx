@@ -37,7 +37,19 @@ function columnsOf(projectId: string, { residue }: Passport): TableColumn<Column
         );
       },
     },
-    { key: 'organism', header: 'organism', cell: (row) => <em>{row.organism}</em> },
+    {
+      key: 'organism',
+      header: 'organism',
+      cell: (row) => {
+        const other = row.kind === 'equivalent' && row.equivalent.numbering !== residue.numbering;
+        return (
+          <Stack gap={0}>
+            <em>{row.organism}</em>
+            {other ? <Text kind="meta" tone="soft">{`${row.equivalent.numbering} numbering`}</Text> : null}
+          </Stack>
+        );
+      },
+    },
     {
       key: 'grade',
       header: 'by equivalence',
