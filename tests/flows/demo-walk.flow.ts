@@ -35,11 +35,13 @@ describe.each([phone, wide])('the demo on a $name screen', (size) => {
   const isPhone = size.name === 'phone';
   let visitor: Visitor;
   const walk = (act: Parameters<typeof withPage>[1]) => withPage(() => visitor, act);
-  const enterAs = async (role: string) => {
-    await visitor?.close();
+  beforeAll(async () => {
     visitor = await Visitor.at(stage.browser, stage.server.origin, size);
-    const name = people.find((person) => person.role === role)?.name ?? '';
-    await enterDemo(visitor, name);
+  });
+  /** One browser that several people use, one after the other. */
+  const enterAs = async (role: string) => {
+    await visitor.context.clearCookies();
+    await enterDemo(visitor, people.find((person) => person.role === role)?.name ?? '');
   };
   afterAll(() => visitor?.close());
 
