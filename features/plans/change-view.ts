@@ -20,13 +20,13 @@ export interface ChangeView {
 
 const nothing: ChangeView = { changes: [], issues: [], suggestions: [], unfinished: null };
 
-/** Reads a change such as `E62Q` in the protein's preferred numbering, as the server will. */
-export function viewChange(text: string, protein: Protein): ChangeView {
+/** Reads a change such as `E62Q` in the protein's preferred numbering, as the server will; its family may stand in front. */
+export function viewChange(text: string, protein: Protein, families: readonly string[] = []): ChangeView {
   if (text.trim() === '') return nothing;
   const numbering = preferredNumberingOf(protein);
   const unfinished = readUnfinished(text, protein, (label) => residueOfLabel(numbering, label));
   if (unfinished) return { ...nothing, unfinished };
-  const parsed = parseMutations(text);
+  const parsed = parseMutations(text, {}, families);
   if (parsed.value === null) return { ...nothing, issues: parsed.issues };
   const [request, another] = parsed.value;
   if (!request) return nothing;

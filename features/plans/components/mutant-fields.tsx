@@ -30,7 +30,7 @@ export function MutantFields({ projectId, form, host, onHost }: MutantFieldsProp
   const family = useFamilies(projectId).data?.find(({ id }) => id === protein?.familyId);
   const constructs = useConstructs(projectId).data;
   const typed = useSettled(changes ?? '');
-  const view = protein ? viewChange(typed, protein) : null;
+  const view = protein ? viewChange(typed, protein, family ? [family.name, ...family.aliases] : []) : null;
   const wrong = view ? errorsOf(view) : '';
   const numbering = protein
     ? `Labels in the ${protein.preferredNumbering} numbering of ${protein.organism}. Changes made together are joined by +.`

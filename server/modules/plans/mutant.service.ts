@@ -168,10 +168,10 @@ export class MutantService {
   }
 
   private async readChanges(proteinId: string, text: string) {
-    const { preferred, protein } = await this.proteins.numbered(proteinId);
+    const { preferred, protein, family } = await this.proteins.numbered(proteinId);
     const refuse = (detail: string, issues: Parameters<typeof unusable>[2]) =>
       unusable('mutation-refused', detail, { ...issues, fields: [{ path: 'changes', message: detail }] });
-    const parsed = parseMutations(text);
+    const parsed = parseMutations(text, {}, [family.name, ...family.aliases]);
     const request = parsed.value?.[0];
     if (!request || (parsed.value?.length ?? 0) > 1) {
       const several = 'Plan one mutant at a time; changes made together are joined by +, like E62Q+R41K.';

@@ -47,6 +47,14 @@ function standardLetter(text: string): string | null {
   return letter !== undefined && STANDARD_LETTERS.includes(letter) ? letter : null;
 }
 
+/** The word without the family it begins with, `cE62Q` or `c-E62Q`: only where it is no exchange as it stands. */
+function withoutFamily(text: string, families: readonly string[]): string {
+  if (SUBSTITUTION.test(text)) return text;
+  const longestFirst = [...families].sort((one, other) => other.length - one.length);
+  const family = longestFirst.find((name) => text.startsWith(name));
+  return family === undefined ? text : text.slice(family.length).replace(/^[-_ .]/, '');
+}
+
 function parseOne(text: string): Substitution | Issue {
   const issue = (code: string, message: string): Issue => ({ code, severity: 'error', message });
   const kind = NOT_YET.find(({ pattern }) => pattern.test(text));
@@ -76,7 +84,8 @@ function parseOne(text: string): Substitution | Issue {
 
 /**
  * Reads mutants as people write them: `E62Q`, `Glu62Gln`; exchanges made together joined by `+` or `/`, mutants apart by comma,
- * semicolon or line. Labels are text (`52A`, `-4`), in whatever numbering the caller looks them up.
+ * semicolon or line. Labels are text (`52A`, `-4`), in whatever numbering the caller looks them up. `families` are the names by
+ * which the protein's family may stand in front, as on a plate: `cE62Q`.
  *
  * Errors: `mutation-empty`, `mutation-unreadable`, `mutation-unknown-residue`, `mutation-without-change`, `mutation-not-yet`,
  * `mutation-twice` (one place named twice in one mutant), `too-many-mutations`. Columns from 1 in the text.
@@ -84,6 +93,7 @@ function parseOne(text: string): Substitution | Issue {
 export function parseMutations(
   text: string,
   limits: Partial<MutationLimits> = {},
+  families: readonly string[] = [],
 ): ParseResult<MutantRequest[]> {
   const { maxMutants, maxTogether } = { ...MUTATION_LIMITS, ...limits };
   const issues: Issue[] = [];
@@ -107,7 +117,7 @@ export function parseMutations(
       return fail('too-many-mutations', `${words.length} changes in one mutant; at most ${maxTogether}.`);
     const substitutions: Substitution[] = [];
     for (const word of words) {
-      const parsed = parseOne(word);
+      const parsed = parseOne(withoutFamily(word, families));
       if ('severity' in parsed) issues.push({ ...parsed, column });
       else if (substitutions.some(({ label }) => label === parsed.label))
         issues.push({

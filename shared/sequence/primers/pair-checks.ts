@@ -31,6 +31,9 @@ function check(
   };
 }
 
+/** The rule's formula stands with its figure: two other temperatures stand beside it and mean something else. */
+const pairRuleBasis = `81.5 + 0.41 × % G and C − 675 ÷ bases − % mismatched; ${COMMON_PRACTICE}`;
+
 /** Checks of what both primers share. */
 export function checkWindow(window: PairWindow): Check[] {
   const { shortestBases, longestBases, shortestArm, lowestGcPercent, highestGcPercent, lowestRuleCelsius } =
@@ -40,13 +43,16 @@ export function checkWindow(window: PairWindow): Check[] {
   const strongEnds = gcAtEnd(changed.slice(0, 1), 1) + gcAtEnd(changed, 1);
   const tooPoor = gcPercent < lowestGcPercent;
   return [
-    check(
-      'pair-rule-melting',
-      'Melting by the pair rule, °C',
-      ruleCelsius,
-      `at least ${lowestRuleCelsius}`,
-      limit(ruleCelsius >= lowestRuleCelsius),
-    ),
+    {
+      ...check(
+        'pair-rule-melting',
+        'Melting by the pair rule, °C',
+        ruleCelsius,
+        `at least ${lowestRuleCelsius}`,
+        limit(ruleCelsius >= lowestRuleCelsius),
+      ),
+      basis: pairRuleBasis,
+    },
     check(
       'length',
       'Bases',

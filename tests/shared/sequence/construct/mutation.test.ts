@@ -130,3 +130,22 @@ describe('held against a protein', () => {
     ]);
   });
 });
+
+test.each([
+  ['cE62Q', ['c'], 'E62Q'],
+  ['c-E62Q', ['c'], 'E62Q'],
+  ['c E62Q + cR41K', ['c'], 'E62Q+R41K'],
+  ['βK173A', ['β', 'beta'], 'K173A'],
+  ['betaLys173Ala', ['β', 'beta'], 'K173A'],
+])('the family may stand in front, as on a plate: %s', (text, families, short) => {
+  const read = parseMutations(text, {}, families).value?.[0]?.substitutions.map((one) => one.short);
+  expect(read?.join('+')).toBe(short);
+});
+
+test('another family in front, or one that would eat the old residue, is not taken off', () => {
+  expect(parseMutations('bK173A', {}, ['β', 'beta']).issues[0]?.code).toBe('mutation-unreadable');
+  expect(parseMutations('A62G', {}, ['A']).value?.[0]?.substitutions[0]).toMatchObject({
+    from: 'A',
+    to: 'G',
+  });
+});
