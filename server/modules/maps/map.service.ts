@@ -37,7 +37,7 @@ export class MapService {
     return this.unitOfWork.write({ projectId }, async (unit) => {
       const map = await unit.manager.findOneByOrFail(ResidueMap, { chainId });
       if (map.version !== version) throw stale((await this.queries.ofChains([chainId], unit.manager))[0]);
-      await this.apply(unit, map, planned);
+      await this.apply(unit, map, planned, structure.name);
       const [presented] = await this.finish(unit, structure.id, chain.revisionId, [chainId]);
       if (!presented) throw new Error('The map just decided cannot be read.');
       return presented;
@@ -57,7 +57,8 @@ export class MapService {
         .andWhere('chain.revisionId = :revisionId', { revisionId })
         .orderBy('chain.ordinal')
         .getMany();
-      for (const map of ready) await this.apply(unit, map, { status: 'confirmed', action: 'map.confirmed' });
+      const confirmed = { status: 'confirmed', action: 'map.confirmed' } as const;
+      for (const map of ready) await this.apply(unit, map, confirmed, structure.name);
       if (ready.length === 0) return [];
       return this.finish(
         unit,
@@ -68,7 +69,12 @@ export class MapService {
     });
   }
 
-  private async apply(unit: Unit, map: ResidueMap, planned: PlannedDecision): Promise<void> {
+  private async apply(
+    unit: Unit,
+    map: ResidueMap,
+    planned: PlannedDecision,
+    structureName: string,
+  ): Promise<void> {
     const before = { status: map.status, proteinId: map.proteinId };
     // What is confirmed may have been taken back, or proposed anew, since it was looked at.
     if (planned.status === 'confirmed' && !planned.target && !map.proteinId)
@@ -81,12 +87,17 @@ export class MapService {
     await unit.manager.save(
       Object.assign(map, { status: planned.status, decidedBy: unit.actorId, decidedAt: unit.at }),
     );
+    const { authorId } = await unit.manager.findOneByOrFail(Chain, { id: map.chainId });
     await unit.audit({
       action: planned.action,
       subjectKind: 'chain',
       subjectId: map.chainId,
       before,
-      after: { status: map.status, proteinId: map.proteinId },
+      after: {
+        status: map.status,
+        proteinId: map.proteinId,
+        name: `chain ${authorId} of ${structureName}`,
+      },
     });
   }
 
