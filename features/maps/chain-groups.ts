@@ -26,8 +26,8 @@ export function standingOf({ status, readiness }: Pick<ChainMap, 'status' | 'rea
 /** What must be equal for two chains to be one row. */
 function sameness(chain: ChainMap): string {
   const { kind, readiness, familyId, proteinId, identity, coverage, reason, segments } = chain;
-  // Where nothing is near, what is seen of the chain has to be alike: other lengths are other sequences.
-  const unmatched = [reason, chain.observedLength, chain.declaredLength, chain.firstLabel, chain.lastLabel];
+  // Where nothing is near, the sequence itself and its numbers have to be alike.
+  const unmatched = [reason, chain.sequenceKey, chain.firstLabel, chain.lastLabel];
   const exceptions = chain.exceptions.map((one) => [one.kind, one.label, one.chainLetter, one.residueIndex]);
   const standing = standingOf(chain);
   const alike = { kind, standing, readiness, familyId, proteinId, identity, coverage, segments, exceptions };

@@ -38,6 +38,8 @@ export const chainMap = z.object({
   kind: z.enum(['protein', 'nucleic', 'other']),
   observedLength: z.int(),
   declaredLength: z.int().nullable(),
+  /** Equal for chains whose declared and seen sequences are equal, and for no others. */
+  sequenceKey: z.string(),
   missingCount: z.int(),
   firstLabel: z.string(),
   lastLabel: z.string(),

@@ -1,5 +1,6 @@
 import type { ChainMap, PersonBrief } from '../../../shared/contracts';
 import { writeLabel } from '../../../shared/sequence/numbering/label-text';
+import { sha256 } from '../../lib/hash';
 import type { Family, Protein } from '../families';
 import type { Chain, ChainLabel } from '../structures';
 import type { MapCandidate } from './map-candidate.entity';
@@ -34,6 +35,7 @@ export function presentChainMap(chain: Chain, context: ChainContext): ChainMap {
     kind: chain.kind,
     observedLength: chain.observed.length,
     declaredLength: chain.declared?.length ?? null,
+    sequenceKey: sha256(`${chain.declared ?? ''}\n${chain.observed}`).slice(0, 16),
     missingCount: chain.missing.length,
     firstLabel: first ? writeLabel({ number: first.firstNumber, suffix: first.suffix }) : '',
     lastLabel: last ? writeLabel({ number: last.firstNumber + last.length - 1, suffix: last.suffix }) : '',

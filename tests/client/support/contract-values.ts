@@ -122,6 +122,7 @@ export const chainMap = (more: Partial<ChainMap> = {}): ChainMap => ({
   kind: 'protein',
   observedLength: 4,
   declaredLength: null,
+  sequenceKey: 'ACDE',
   missingCount: 0,
   firstLabel: '1',
   lastLabel: '4',

@@ -23,6 +23,7 @@ function chainOf(authorId: string, change: Partial<ChainMap> = {}): ChainMap {
     kind: 'protein',
     observedLength: 79,
     declaredLength: 82,
+    sequenceKey: 'c of Orvella tarda',
     missingCount: 3,
     firstLabel: '2',
     lastLabel: '80',
@@ -90,6 +91,22 @@ describe('chains are grouped', () => {
       chainOf('O', { status: 'left out' }),
     ]);
     expect(groups.map(({ names }) => names)).toEqual(['X', 'L', 'R', 'D', 'O', 'N']);
+  });
+
+  it('keeps unmatched chains of equal length and numbers apart when their sequences differ', () => {
+    const unmatched = {
+      readiness: 'choose',
+      proteinId: null,
+      identity: null,
+      coverage: null,
+      segments: [],
+    } as const;
+    const groups = groupChains([
+      chainOf('A', { ...unmatched, segments: [] }),
+      chainOf('B', { ...unmatched, segments: [] }),
+      chainOf('C', { ...unmatched, segments: [], sequenceKey: 'another' }),
+    ]);
+    expect(groups.map(({ names }) => names)).toEqual(['A, B', 'C']);
   });
 
   it('counts chains, not groups', () => {
