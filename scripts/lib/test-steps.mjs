@@ -55,6 +55,8 @@ function jest(project, ...args) {
       '--outputFile',
       report,
       '--passWithNoTests',
+      // A connection that is slow to close must not hold a run whose results are there.
+      '--forceExit',
       ...args,
     ];
     const code = await run(process.execPath, [bin('jest', 'bin', 'jest.js'), ...options], {
