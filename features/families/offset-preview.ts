@@ -27,8 +27,8 @@ export const placeOfOne = (offset: number): number => 1 - offset;
 export function offsetOf(numbering: Numbering): { offset: number; skipZero: boolean } | null {
   if (numbering.kind !== 'offset') return null;
   const positive = numbering.segments.find(({ firstNumber, length }) => firstNumber + length > 1);
-  const any = positive ?? numbering.segments[0];
-  if (!any) return null;
+  const run = positive ?? numbering.segments[0];
+  if (!run) return null;
   const hasNegative = numbering.segments.some(({ firstNumber }) => firstNumber < 0);
   const hasZero = numbering.segments.some(
     ({ firstNumber, length }) => firstNumber <= 0 && firstNumber + length > 0,
@@ -36,7 +36,7 @@ export function offsetOf(numbering: Numbering): { offset: number; skipZero: bool
   const skipZero = hasNegative && !hasZero;
   // Without a positive label the numbers below the missing zero are one lower than the offset says.
   const shift = skipZero && !positive ? 1 : 0;
-  return { offset: any.firstNumber + shift - (any.residueIndex + 1), skipZero };
+  return { offset: run.firstNumber + shift - (run.residueIndex + 1), skipZero };
 }
 
 export interface PreviewRow {
